@@ -1,0 +1,51 @@
+import { type ImportField } from './home-draft'
+
+/** What each column is called on screen, in the groups that the choice is made from. */
+export const IMPORT_FIELD_GROUPS: readonly (readonly [string, readonly ImportField[]])[] = [
+  [
+    'Which home',
+    ['reference', 'uprn', 'number', 'street', 'address', 'town', 'postcode', 'block', 'patch', 'kind'],
+  ],
+  ['How it is let', ['tenure', 'nation']],
+  ['The building', ['built', 'dwelling-type', 'bedrooms']],
+  ['The installation', ['board-type', 'rcd-cover', 'ways', 'wiring', 'rewired']],
+  ['Inspections', ['last-inspection', 'assessment', 'next-due', 'open-c1', 'open-c2', 'open-c3', 'open-fi']],
+  ['Where it is', ['easting', 'northing', 'grid-reference', 'latitude', 'longitude']],
+  ['Other', ['note']],
+]
+
+export const IMPORT_FIELD_NAMES: Record<ImportField, string> = {
+  reference: 'Your own reference',
+  uprn: 'UPRN',
+  kind: 'Home or landlord supply',
+  block: 'Block',
+  number: 'House or flat number',
+  street: 'Street',
+  address: 'Address',
+  town: 'Town',
+  postcode: 'Postcode',
+  patch: 'Patch',
+  nation: 'Nation',
+  tenure: 'Tenure',
+  built: 'Year built',
+  'dwelling-type': 'Kind of dwelling',
+  bedrooms: 'Bedrooms',
+  'board-type': 'Consumer unit',
+  'rcd-cover': 'RCD cover',
+  ways: 'Ways',
+  wiring: 'Wiring',
+  rewired: 'Year rewired',
+  'last-inspection': 'Last inspection',
+  assessment: 'Overall assessment',
+  'next-due': 'Next inspection due',
+  'open-c1': 'Open C1',
+  'open-c2': 'Open C2',
+  'open-c3': 'Open C3',
+  'open-fi': 'Open FI',
+  easting: 'Easting',
+  northing: 'Northing',
+  'grid-reference': 'Grid reference',
+  latitude: 'Latitude',
+  longitude: 'Longitude',
+  note: 'Note',
+}
