@@ -1,0 +1,6 @@
+export function findProgram(name: string): string | null
+export function programPath(name: string): string
+export function installIfMissing(wanted?: {
+  debianPackage: string
+  programs: string[]
+}): 'present' | 'installed'
