@@ -42,7 +42,7 @@ export function HomesInView({ query, list, today }: Props) {
           No home in this part of the map. Move it, or zoom out.
         </p>
       ) : (
-        <Table caption="Homes in view">
+        <Table caption="Table of homes in view">
           <thead>
             <tr>
               <HeadCell>Home</HeadCell>

@@ -38,7 +38,7 @@ export function MapPanel({ query, tiles }: { query: HomeQuery; tiles: Tiles | nu
   const [view, setView] = useState<View>(WORLD)
   // where a person's own hand has put the map, as the address has it or will have it in a moment
   const [own, setOwn] = useState<readonly string[]>([])
-  const [asked, setAsked] = useState<{ goal: Goal; at: string } | null>(null)
+  const [asked, setAsked] = useState<Goal | null>(null)
   const timer = useRef<ReturnType<typeof setTimeout>>(undefined)
 
   // the filter without what only the list needs
@@ -59,13 +59,18 @@ export function MapPanel({ query, tiles }: { query: HomeQuery; tiles: Tiles | nu
   // where somebody asked to go; else the area of the address, unless a hand left the map there; else all homes
   const within = query.within?.join()
   const at = `${filter} ${within ?? ''}`
+  const [seen, setSeen] = useState(at)
+  if (seen !== at) {
+    setSeen(at)
+    setAsked(null)
+  }
   const target = within === undefined ? data?.extent?.join() : own.includes(within) ? undefined : within
   const derived = useMemo<Goal | null>(
     () =>
       target === undefined ? null : { box: target.split(',').map(Number) as unknown as Box, silent: true },
     [target],
   )
-  const goal = asked?.at === at ? asked.goal : derived
+  const goal = asked ?? derived
 
   const onView = useCallback(
     (next: View, byHand: boolean) => {
@@ -74,7 +79,6 @@ export function MapPanel({ query, tiles }: { query: HomeQuery; tiles: Tiles | nu
       if (!byHand) return
       timer.current = setTimeout(() => {
         setOwn((before) => [...before.slice(-20), next.box.join()])
-        setAsked(null)
         startTransition(() =>
           router.replace(listAddress(query, { within: [...next.box] }, '/map'), { scroll: false }),
         )
@@ -95,7 +99,7 @@ export function MapPanel({ query, tiles }: { query: HomeQuery; tiles: Tiles | nu
   const showAll = () => {
     clearTimeout(timer.current)
     setOwn([])
-    setAsked(data?.extent ? { goal: { box: data.extent, silent: true }, at: `${filter} ` } : null)
+    if (within === undefined && data?.extent) setAsked({ box: data.extent, silent: true })
     startTransition(() =>
       router.replace(listAddress(query, { within: undefined }, '/map'), { scroll: false }),
     )
@@ -137,7 +141,7 @@ export function MapPanel({ query, tiles }: { query: HomeQuery; tiles: Tiles | nu
           listHref={listHref}
         />
       </div>
-      {data && <InView homes={data} onCluster={(box) => setAsked({ goal: { box, silent: false }, at })} />}
+      {data && <InView homes={data} onCluster={(box) => setAsked({ box, silent: false })} />}
     </section>
   )
 }

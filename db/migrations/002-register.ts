@@ -165,5 +165,7 @@ export const register: Migration = {
       foreign key (organisation_id, home_id) references homes (organisation_id, id)
     )`,
   ],
-  down: ['assessments', 'home_register', 'defects', 'inspections', 'home_facts', 'homes', 'blocks'].map((table) => `drop table ${table}`),
+  down: ['assessments', 'home_register', 'defects', 'inspections', 'home_facts', 'homes', 'blocks'].map(
+    (table) => `drop table ${table}`,
+  ),
 }

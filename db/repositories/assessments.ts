@@ -22,7 +22,10 @@ export type NewAssessment = {
 }
 
 /** Enough to tell whether a new assessment says anything new. */
-export type CurrentScore = Pick<NewAssessment, 'homeId' | 'id' | 'methodVersion' | 'factsKey' | 'beganOn' | 'score'>
+export type CurrentScore = Pick<
+  NewAssessment,
+  'homeId' | 'id' | 'methodVersion' | 'factsKey' | 'beganOn' | 'score'
+>
 
 /** The current scores of some homes, in no order. */
 export async function listCurrent(scope: Scope, homeIds: readonly string[]): Promise<CurrentScore[]> {
@@ -53,7 +56,11 @@ export type AssessmentOnRecord = {
 }
 
 /** The assessments of one home, the current one first, then the newest. */
-export async function listForHome(scope: Scope, homeId: string, limit: number): Promise<AssessmentOnRecord[]> {
+export async function listForHome(
+  scope: Scope,
+  homeId: string,
+  limit: number,
+): Promise<AssessmentOnRecord[]> {
   return (await scope
     .db('assessments')
     .where({ organisation_id: scope.organisationId, home_id: homeId })
@@ -67,7 +74,9 @@ export async function listForHome(scope: Scope, homeId: string, limit: number): 
       low: 'score_low',
       high: 'score_high',
     })
-    .select(scope.db.raw('if(is_current, explanation, null) as explanation'))) as unknown as AssessmentOnRecord[]
+    .select(
+      scope.db.raw('if(is_current, explanation, null) as explanation'),
+    )) as unknown as AssessmentOnRecord[]
 }
 
 const COLUMNS = [
@@ -88,7 +97,10 @@ const BRING_UP_TO_DATE = `on duplicate key update ${COLUMNS.slice(6)
   .join(',')}`
 
 /** Adds assessments as the current ones of their homes; a row with the id of a current one is brought up to date. */
-export async function writeCurrent(scope: WritingScope, assessments: readonly NewAssessment[]): Promise<void> {
+export async function writeCurrent(
+  scope: WritingScope,
+  assessments: readonly NewAssessment[],
+): Promise<void> {
   const rows = assessments.map((one): Value[] => [
     scope.organisationId,
     one.homeId,

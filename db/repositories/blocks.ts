@@ -12,7 +12,8 @@ export const list = (scope: Scope): Promise<Block[]> => listNames(scope, 'blocks
 export const getById = (scope: Scope, id: string): Promise<Block> => getName(scope, 'blocks', id)
 
 /** A block by its name, in any case, or null. */
-export const findByName = (scope: Scope, name: string): Promise<Block | null> => findName(scope, 'blocks', name)
+export const findByName = (scope: Scope, name: string): Promise<Block | null> =>
+  findName(scope, 'blocks', name)
 
 /** Adds a block; the name must be free. */
 export async function insert(scope: WritingScope, name: string): Promise<Block> {

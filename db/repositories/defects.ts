@@ -92,7 +92,9 @@ export async function listForHome(scope: Scope, homeId: string): Promise<DefectO
     .leftJoin('people as recorder', 'recorder.id', 'defect.recorded_by')
     .leftJoin('people as closer', 'closer.id', 'defect.closed_by')
     .where({ 'defect.organisation_id': scope.organisationId, 'defect.home_id': homeId })
-    .orderByRaw("defect.closed_on is not null, field(defect.code, 'C1', 'C2', 'FI', 'C3'), defect.recorded_at desc, defect.id desc")
+    .orderByRaw(
+      "defect.closed_on is not null, field(defect.code, 'C1', 'C2', 'FI', 'C3'), defect.recorded_at desc, defect.id desc",
+    )
     .select('defect.*', 'recorder.name as recorder_name', 'closer.name as closer_name')) as (Row & {
     recorder_name: string | null
     closer_name: string | null

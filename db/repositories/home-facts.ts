@@ -68,7 +68,10 @@ export async function listForHome(scope: Scope, homeId: string): Promise<FactOnR
 }
 
 /** Makes facts history: they stay, and are current no more. */
-export async function supersede(scope: WritingScope, facts: readonly Pick<HomeFact, 'homeId' | 'id'>[]): Promise<void> {
+export async function supersede(
+  scope: WritingScope,
+  facts: readonly Pick<HomeFact, 'homeId' | 'id'>[],
+): Promise<void> {
   if (facts.length === 0) return
   await scope
     .db('home_facts')

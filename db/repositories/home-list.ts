@@ -27,11 +27,22 @@ export const fits = (place: Place, { sort }: Ordering): boolean =>
     : typeof place.value === (sort === 'score' || sort === 'built' ? 'number' : 'string')
 
 /** Homes with the same value follow one another as the index has them, so that it serves both directions. */
-const tieOrder = ({ sort, order }: Ordering) => (sort === 'score' ? (order === 'desc' ? 'asc' : 'desc') : order)
+const tieOrder = ({ sort, order }: Ordering) =>
+  sort === 'score' ? (order === 'desc' ? 'asc' : 'desc') : order
 
 type Key = { id: string; value: string | number | null }
 
-function keysAfter(query: Knex.QueryBuilder, ordering: Ordering, after: Place | null, limit: number): Promise<Key[]> {
+/**
+ * The first homes of a query in an order, from after a place. What a search looks in is in no index: walking one
+ * in order would fetch every home apart until enough are found, so `scan` reads them as they lie and sorts the found.
+ */
+function keysAfter(
+  query: Knex.QueryBuilder,
+  ordering: Ordering,
+  after: Place | null,
+  limit: number,
+  scan: boolean,
+): Promise<Key[]> {
   const { column } = SORTED_BY[ordering.sort]
   const tie = tieOrder(ordering)
   const beyond = { asc: '>', desc: '<' } as const
@@ -43,17 +54,22 @@ function keysAfter(query: Knex.QueryBuilder, ordering: Ordering, after: Place | 
           .where(column, beyond[ordering.order], after.value)
           .orWhere('register.home_id', beyond[tie], after.id),
       )
+  // an expression keeps the planner from walking the index of the column itself
+  if (scan) query.orderByRaw(`if(true, ${column}, null) ${ordering.order}`)
+  else query.orderBy(column, ordering.order)
   return query
-    .orderBy([
-      { column, order: ordering.order },
-      { column: 'register.home_id', order: tie },
-    ])
+    .orderBy('register.home_id', tie)
     .limit(limit)
     .select({ id: 'register.home_id', value: column }) as unknown as Promise<Key[]>
 }
 
 /** Homes that lack the value come last, in the order of their ids. */
-function keysWithout(query: Knex.QueryBuilder, ordering: Ordering, afterId: string | null, limit: number): Promise<Key[]> {
+function keysWithout(
+  query: Knex.QueryBuilder,
+  ordering: Ordering,
+  afterId: string | null,
+  limit: number,
+): Promise<Key[]> {
   const { column } = SORTED_BY[ordering.sort]
   const tie = tieOrder(ordering)
   query.whereNull(column)
@@ -77,7 +93,7 @@ export async function listPlaces(
   if (after === null || after.value !== null) {
     const query = filtered(scope, filter)
     if (mayLack) query.whereNotNull(column)
-    known.push(...(await keysAfter(query, ordering, after, limit)))
+    known.push(...(await keysAfter(query, ordering, after, limit, filter.query.search.trim() !== '')))
   }
   if (!mayLack || known.length === limit) return known
   const afterId = after?.value === null ? after.id : null
@@ -85,7 +101,11 @@ export async function listPlaces(
 }
 
 /** Homes by their ids and in their order, with the names of their patches and blocks: one statement. */
-export async function listByIds(scope: Scope, reach: Reach, ids: readonly string[]): Promise<RegisteredHome[]> {
+export async function listByIds(
+  scope: Scope,
+  reach: Reach,
+  ids: readonly string[],
+): Promise<RegisteredHome[]> {
   if (ids.length === 0) return []
   const query = scope
     .db('home_register as register')
@@ -117,7 +137,12 @@ export async function count(scope: Scope, filter: HomeFilter): Promise<number> {
 }
 
 /** The homes that a search finds: whole words and whole numbers first, then by address. */
-export async function listFound(scope: Scope, filter: HomeFilter, word: string, limit: number): Promise<string[]> {
+export async function listFound(
+  scope: Scope,
+  filter: HomeFilter,
+  word: string,
+  limit: number,
+): Promise<string[]> {
   const rows = (await filtered(scope, filter)
     .orderByRaw('register.search_text like ? desc', [`% ${word} %`])
     .orderBy([{ column: 'register.address_sort' }, { column: 'register.home_id' }])

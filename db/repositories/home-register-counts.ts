@@ -19,7 +19,9 @@ const BOARD_UNKNOWN = "register.board_type = 'unknown'"
 
 /** Counts come back as numbers, sums as numbers or null where there was no row. */
 const numbers = <T extends Record<string, unknown>>(row: T): { [K in keyof T]: number } =>
-  Object.fromEntries(Object.entries(row).map(([key, value]) => [key, Number(value ?? 0)])) as { [K in keyof T]: number }
+  Object.fromEntries(Object.entries(row).map(([key, value]) => [key, Number(value ?? 0)])) as {
+    [K in keyof T]: number
+  }
 
 /** How many homes there are within reach. */
 export async function count(scope: Scope, reach: Reach): Promise<number> {
@@ -103,13 +105,16 @@ export async function countByBlock(
 
 export type StandingCounts = Readonly<Record<Standing, number>> & { readonly homes: number }
 
-/** Homes by standing on a day, by the rule of lib/duties/standing-of. */
+/** Homes with an open C1, and with an open C2. */
+export type DangerCounts = { readonly withC1: number; readonly withC2: number }
+
+/** Homes by standing on a day, by the rule of lib/duties/standing-of, and those with dangerous defects. */
 export async function countByStanding(
   scope: Scope,
   reach: Reach,
   today: CalendarDay,
   noticeDays: number,
-): Promise<StandingCounts> {
+): Promise<{ standing: StandingCounts; danger: DangerCounts }> {
   const noticeEnds = addDays(today, noticeDays)
   const dated = "register.inspection_record = 'dated' and register.due_on"
   const row = (await register(scope, reach)
@@ -118,13 +123,14 @@ export async function countByStanding(
         `count(*) as homes, sum(register.inspection_record = 'never') as never,
          sum(coalesce(${dated} < ?, 0)) as lapsed,
          sum(coalesce(${dated} between ? and ?, 0)) as due,
-         sum(coalesce(${dated} > ?, 0)) as in_date`,
+         sum(coalesce(${dated} > ?, 0)) as in_date,
+         sum(register.open_c1 > 0) as withC1, sum(register.open_c2 > 0) as withC2`,
         [today, today, noticeEnds, noticeEnds],
       ),
     )
-    .first()) as Record<'homes' | 'never' | 'lapsed' | 'due' | 'in_date', number | null>
-  const { homes, never, lapsed, due, in_date } = numbers(row)
-  return {
+    .first()) as Record<'homes' | 'never' | 'lapsed' | 'due' | 'in_date' | 'withC1' | 'withC2', number | null>
+  const { homes, never, lapsed, due, in_date, ...danger } = numbers(row)
+  const standing = {
     homes,
     'never inspected': never,
     lapsed,
@@ -132,6 +138,7 @@ export async function countByStanding(
     'in date': in_date,
     'unknown date': homes - never - lapsed - due - in_date,
   }
+  return { standing, danger }
 }
 
 /** How many homes' reports end on each day of a span, ends included. */
@@ -151,7 +158,11 @@ export async function countByDueDay(
 }
 
 /** A score's place among those within reach: how many are higher, and how many there are. */
-export async function rankOf(scope: Scope, reach: Reach, score: number): Promise<{ higher: number; homes: number }> {
+export async function rankOf(
+  scope: Scope,
+  reach: Reach,
+  score: number,
+): Promise<{ higher: number; homes: number }> {
   const row = (await register(scope, reach)
     .select(scope.db.raw('count(*) as homes, sum(register.score > ?) as higher', [score]))
     .first()) as { homes: number; higher: number | null }

@@ -45,12 +45,12 @@ const ANY_OPEN = Object.values(OPEN_COLUMNS)
 function whereSearch(query: Query, search: string): void {
   const patterns = searchPatterns(search)
   if (!patterns) return
+  const { all, whole } = patterns
   query.andWhere((either) => {
-    either.where('register.search_text', 'like', patterns.whole)
-    if (patterns.all.length > 0)
-      either.orWhere((every) => {
-        for (const pattern of patterns.all) every.where('register.search_text', 'like', pattern)
-      })
+    either.where((every) => {
+      for (const pattern of all) every.where('register.search_text', 'like', pattern)
+    })
+    if (whole !== null) either.orWhere('register.search_text', 'like', whole)
   })
 }
 
@@ -64,20 +64,26 @@ function wherePatch(query: Query, patches: readonly string[]): void {
 function whereBuilt(query: Query, from: number | undefined, to: number | undefined): void {
   if (from === undefined && to === undefined) return
   query.whereNotNull('register.built_sort')
-  if (from !== undefined) query.andWhere((row) => row.where('register.built_to', '>=', from).orWhereNull('register.built_to'))
-  if (to !== undefined) query.andWhere((row) => row.where('register.built_from', '<=', to).orWhereNull('register.built_from'))
+  if (from !== undefined)
+    query.andWhere((row) => row.where('register.built_to', '>=', from).orWhereNull('register.built_to'))
+  if (to !== undefined)
+    query.andWhere((row) => row.where('register.built_from', '<=', to).orWhereNull('register.built_from'))
 }
 
 /** The register's rows that a filter lets through; the board's condition may be left aside, to count beside it. */
 export function filtered(scope: Scope, filter: HomeFilter, leave: { board?: boolean } = {}): Query {
   const { query: asked } = filter
-  const query: Query = scope.db('home_register as register').where('register.organisation_id', scope.organisationId)
+  const query: Query = scope
+    .db('home_register as register')
+    .where('register.organisation_id', scope.organisationId)
   withinReach(query, filter.reach, 'register.patch_id')
   whereSearch(query, asked.search)
   if (asked.patch.length > 0) wherePatch(query, asked.patch)
   if (asked.block.length > 0) query.whereIn('register.block_id', asked.block)
   if (asked.board.length > 0 && !leave.board) {
-    const boards = asked.board.flatMap((board) => (board === 'rewireable-ways' ? ['rewireable', 'mixed'] : [board]))
+    const boards = asked.board.flatMap((board) =>
+      board === 'rewireable-ways' ? ['rewireable', 'mixed'] : [board],
+    )
     query.whereIn('register.board_type', [...new Set(boards)])
   }
   if (asked.cover.length > 0) query.whereIn('register.rcd_cover', asked.cover)

@@ -22,14 +22,24 @@ export type MapCell = {
   readonly homeId: string
 }
 
-const EACH_BOARD = BOARD_TYPES.map((board) => `sum(register.board_type = '${board}') as \`${board}\``).join(', ')
+const EACH_BOARD = BOARD_TYPES.map((board) => `sum(register.board_type = '${board}') as \`${board}\``).join(
+  ', ',
+)
 
 /** The cells that hold homes of a filter, the fullest first; `limit` is a stop, not a page. */
-export async function listCells(scope: Scope, filter: HomeFilter, cell: CellSize, limit: number): Promise<MapCell[]> {
+export async function listCells(
+  scope: Scope,
+  filter: HomeFilter,
+  cell: CellSize,
+  limit: number,
+): Promise<MapCell[]> {
   const rows = (await filtered(scope, filter)
     .whereNotNull('register.longitude')
     .whereNotNull('register.latitude')
-    .groupByRaw('floor(register.longitude / ?), floor(register.latitude / ?)', [cell.longitude, cell.latitude])
+    .groupByRaw('floor(register.longitude / ?), floor(register.latitude / ?)', [
+      cell.longitude,
+      cell.latitude,
+    ])
     .orderBy('homes', 'desc')
     .limit(limit)
     .select(
@@ -63,7 +73,11 @@ export type MapPoint = {
 }
 
 /** Single homes of a filter by their ids, as points. */
-export async function listPoints(scope: Scope, filter: HomeFilter, ids: readonly string[]): Promise<MapPoint[]> {
+export async function listPoints(
+  scope: Scope,
+  filter: HomeFilter,
+  ids: readonly string[],
+): Promise<MapPoint[]> {
   if (ids.length === 0) return []
   return (await filtered(scope, filter)
     .join('homes as home', (on) =>
@@ -83,7 +97,10 @@ export async function listPoints(scope: Scope, filter: HomeFilter, ids: readonly
 }
 
 /** How many homes of a filter have a place, how many have none, and the box that holds those that have one. */
-export async function extent(scope: Scope, filter: HomeFilter): Promise<{
+export async function extent(
+  scope: Scope,
+  filter: HomeFilter,
+): Promise<{
   placed: number
   unplaced: number
   box: [west: number, south: number, east: number, north: number] | null
@@ -96,11 +113,13 @@ export async function extent(scope: Scope, filter: HomeFilter): Promise<{
          max(register.longitude) as east, max(register.latitude) as north`,
       ),
     )
-    .first()) as Record<'placed' | 'unplaced', number> & Record<'west' | 'south' | 'east' | 'north', number | null>
+    .first()) as Record<'placed' | 'unplaced', number> &
+    Record<'west' | 'south' | 'east' | 'north', number | null>
   const { west, south, east, north } = row
   return {
     placed: Number(row.placed),
     unplaced: Number(row.unplaced),
-    box: west === null || south === null || east === null || north === null ? null : [west, south, east, north],
+    box:
+      west === null || south === null || east === null || north === null ? null : [west, south, east, north],
   }
 }

@@ -29,14 +29,6 @@ export async function listWorst(scope: Scope, reach: Reach, limit: number, code?
   return rows.map((row) => row.id)
 }
 
-/** How many homes have an open C1, and how many an open C2. */
-export async function countDangerous(scope: Scope, reach: Reach): Promise<{ withC1: number; withC2: number }> {
-  const row = (await register(scope, reach)
-    .select(scope.db.raw('sum(register.open_c1 > 0) as withC1, sum(register.open_c2 > 0) as withC2'))
-    .first()) as { withC1: number | null; withC2: number | null }
-  return { withC1: Number(row.withC1 ?? 0), withC2: Number(row.withC2 ?? 0) }
-}
-
 /** The homes whose open defect of a code was found longest ago; one without a date is as old as any, so it comes first. */
 export async function listOldestOpen(
   scope: Scope,
@@ -48,7 +40,9 @@ export async function listOldestOpen(
     scope
       .db('defects as defect')
       .join('home_register as register', (on) =>
-        on.on('register.organisation_id', 'defect.organisation_id').andOn('register.home_id', 'defect.home_id'),
+        on
+          .on('register.organisation_id', 'defect.organisation_id')
+          .andOn('register.home_id', 'defect.home_id'),
       )
       .where({ 'defect.organisation_id': scope.organisationId, 'defect.code': code })
       .whereNull('defect.closed_on'),
@@ -59,6 +53,8 @@ export async function listOldestOpen(
     .orderByRaw('max(defect.raised_on is null) desc, min(defect.raised_on), defect.home_id')
     .limit(limit)
     .select({ homeId: 'defect.home_id' })
-    .select(scope.db.raw('if(max(defect.raised_on is null), null, min(defect.raised_on)) as raisedOn'))) as unknown as OldestDefect[]
+    .select(
+      scope.db.raw('if(max(defect.raised_on is null), null, min(defect.raised_on)) as raisedOn'),
+    )) as unknown as OldestDefect[]
   return rows
 }

@@ -45,15 +45,18 @@ const bare = (digits: string) => (/^0\d{5,}$/.test(digits) ? digits.replace(/^0+
 
 /**
  * What a search asks for: every one of `all`, or else `whole`, the search run together, so that a UPRN,
- * a reference or a postcode is found in any spacing. Null where nothing was typed; a search of nothing
- * but marks finds nothing.
+ * a reference or a postcode is found in any spacing; null where that could find nothing more. Null where
+ * nothing was typed; a search of nothing but marks finds nothing.
  * @example searchPatterns('12 herring') // { all: ['% 12%', '%herring%'], whole: '% 12herring%' }
+ * @example searchPatterns('herring') // { all: ['%herring%'], whole: null }
  */
-export function searchPatterns(search: string): { all: readonly string[]; whole: string } | null {
+export function searchPatterns(search: string): { all: readonly string[]; whole: string | null } | null {
   if (search.trim() === '') return null
   const folded = foldWords(search)
-  if (folded === '') return { all: [], whole: NOTHING }
-  return { all: folded.split(' ').map(pattern), whole: `% ${bare(close(folded))}%` }
+  if (folded === '') return { all: [NOTHING], whole: null }
+  const words = folded.split(' ')
+  const whole = bare(close(folded))
+  return { all: words.map(pattern), whole: words.length > 1 || whole !== folded ? `% ${whole}%` : null }
 }
 
 /** A page's cursor carries the key, so it is kept short in bytes too. */
@@ -68,7 +71,10 @@ export function addressSortOf(address: string, town: string | null): string {
   const parts = address.split(',').map((part) => part.trim())
   const at = parts.findIndex((part) => /^\d/.test(part) && /\p{L}{2}/u.test(part))
   const [, number = '', street = ''] = /^(\d\S*(?:\s*[-–]\s*\d\S*)?)\s+(.*)$/.exec(parts[at] ?? '') ?? []
-  const ordered = street === '' ? [address, town ?? ''] : [street, ...parts.slice(at + 1), town ?? '', number, ...parts.slice(0, at)]
+  const ordered =
+    street === ''
+      ? [address, town ?? '']
+      : [street, ...parts.slice(at + 1), town ?? '', number, ...parts.slice(0, at)]
   const key = foldWords(ordered.join(' ')).replace(/\d+/g, (digits) => digits.padStart(6, '0'))
   return key.slice(0, isPlain(key) ? 220 : 70)
 }

@@ -154,5 +154,7 @@ export const toRegisteredHome = (row: RegisterRow): RegisteredHome => ({
   scoreLow: row.score_low,
   scoreHigh: row.score_high,
   place:
-    row.latitude === null || row.longitude === null ? null : { latitude: row.latitude, longitude: row.longitude },
+    row.latitude === null || row.longitude === null
+      ? null
+      : { latitude: row.latitude, longitude: row.longitude },
 })

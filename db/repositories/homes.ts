@@ -78,7 +78,8 @@ export async function getById(scope: Scope, reach: Reach, id: string): Promise<H
 
 /** A home by its id, held against other writers until the transaction ends. @throws NotFound as getById */
 export async function getForChange(scope: WritingScope, reach: Reach, id: string): Promise<Home> {
-  const row = (await withinReach(within(scope), reach).where({ id }).forUpdate().first(COLUMNS)) as Row | undefined
+  const row = (await withinReach(within(scope), reach).where({ id }).forUpdate().first(COLUMNS)) as
+    Row | undefined
   if (!row) throw new NotFound('That home')
   return toHome(row)
 }
@@ -86,7 +87,11 @@ export async function getForChange(scope: WritingScope, reach: Reach, id: string
 /** Homes by their ids, in no order; ids of other organisations are passed over. */
 export async function listByIds(scope: Scope, ids: readonly string[]): Promise<Home[]> {
   if (ids.length === 0) return []
-  return ((await within(scope).whereIn('id', [...ids]).select(COLUMNS)) as Row[]).map(toHome)
+  return (
+    (await within(scope)
+      .whereIn('id', [...ids])
+      .select(COLUMNS)) as Row[]
+  ).map(toHome)
 }
 
 /** Homes that share a UPRN, a reference or a folded address with one; held, so that two alike are not added at once. */
@@ -125,7 +130,11 @@ export async function insertMany(scope: WritingScope, homes: readonly Home[]): P
 }
 
 /** Changes some fields of one home. */
-export async function update(scope: WritingScope, id: string, changes: Partial<Omit<Home, 'id'>>): Promise<void> {
+export async function update(
+  scope: WritingScope,
+  id: string,
+  changes: Partial<Omit<Home, 'id'>>,
+): Promise<void> {
   const columns = Object.fromEntries(
     Object.entries(changes).map(([field, value]) => [COLUMN_OF[field as keyof Home], value]),
   )

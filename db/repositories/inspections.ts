@@ -32,7 +32,16 @@ type Row = {
   note: string | null
 }
 
-const READ = ['id', 'home_id', 'inspected_on', 'inspected_precision', 'assessment', 'next_due_on', 'source', 'note']
+const READ = [
+  'id',
+  'home_id',
+  'inspected_on',
+  'inspected_precision',
+  'assessment',
+  'next_due_on',
+  'source',
+  'note',
+]
 
 const toInspection = (row: Row): Inspection => ({
   id: row.id,

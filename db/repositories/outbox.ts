@@ -94,9 +94,12 @@ export async function claim(scope: DeploymentScope, owner: string, leaseSeconds:
 const held = (scope: DeploymentScope, notice: ClaimedNotice) =>
   scope.db('outbox').where({ organisation_id: notice.organisationId, id: notice.id, fence: notice.fence })
 
+/** A letter that has left, or never will, keeps no words: its links stand in for a sign-in. */
+const EMPTIED = { body_text: '', body_html: '' }
+
 /** Marks a claimed notice as sent; false where the lease was lost to another worker. */
 export async function markSent(scope: DeploymentScope, notice: ClaimedNotice): Promise<boolean> {
-  return (await held(scope, notice).update({ state: 'sent', sent_at: now(), lease_until: null, last_error: null })) === 1
+  return (await held(scope, notice).update({ state: 'sent', sent_at: now(), lease_until: null, last_error: null, ...EMPTIED })) === 1
 }
 
 /** Puts a claimed notice back for another try, or gives it up where `retryAt` is null. */
@@ -106,5 +109,6 @@ export async function markFailed(scope: DeploymentScope, notice: ClaimedNotice, 
     due_at: retryAt ?? now(),
     lease_until: null,
     last_error: why.slice(0, 500),
+    ...(retryAt === null && EMPTIED),
   })
 }

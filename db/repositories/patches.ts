@@ -12,7 +12,8 @@ export const list = (scope: Scope): Promise<Patch[]> => listNames(scope, 'patche
 export const getById = (scope: Scope, id: string): Promise<Patch> => getName(scope, 'patches', id)
 
 /** A patch by its name, in any case, or null. */
-export const findByName = (scope: Scope, name: string): Promise<Patch | null> => findName(scope, 'patches', name)
+export const findByName = (scope: Scope, name: string): Promise<Patch | null> =>
+  findName(scope, 'patches', name)
 
 /** Adds a patch; the name must be free. */
 export async function insert(scope: WritingScope, name: string): Promise<Patch> {

@@ -41,7 +41,7 @@ const LONGEST_UNKNOWN = 24
  * @example saysUnknown('none') // false
  */
 export function saysUnknown(text: string): boolean {
-  if (text.length > LONGEST_UNKNOWN && !UNKNOWN_START.test(text)) return false
+  if (text.length > LONGEST_UNKNOWN && /[\p{L}\p{N}]/u.test(text) && !UNKNOWN_START.test(text)) return false
   const words = foldWords(text)
   return words === '' || UNKNOWN.has(words) || UNKNOWN_START.test(words)
 }

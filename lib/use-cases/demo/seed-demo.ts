@@ -80,9 +80,12 @@ async function seedOne(
     const placed = await addHomes(scope, organisation, homes, manager, today)
     await grantAll(scope, organisation, byEmail)
     await recordDetails(scope, placed, { firm: ids.supervisor ?? manager, officer: ids.officer ?? manager })
+    const detailed = placed.filter(
+      ({ home }) => home.inspections.length + home.corrections.length + home.officerDefects.length > 0,
+    )
     await refreshHomes(
       scope,
-      placed.map(({ homeId }) => homeId),
+      detailed.map(({ homeId }) => homeId),
       today,
     )
     await audit.record(scope, {

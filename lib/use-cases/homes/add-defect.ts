@@ -32,11 +32,17 @@ export type AddDefect = z.output<typeof AddDefect>
  * Puts a defect on record as open; the score follows at once.
  * @throws NotFound, NotAllowed; Invalid where the date lies ahead
  */
-export async function addDefect(actor: Actor, input: AddDefect, today: CalendarDay): Promise<{ defectId: string }> {
+export async function addDefect(
+  actor: Actor,
+  input: AddDefect,
+  today: CalendarDay,
+): Promise<{ defectId: string }> {
   demand(actor, 'homes.edit')
   const { code, description, location, raisedOn = { day: today, precision: 'day' } } = input
   if (raisedOn.day > today)
-    throw new Invalid([{ field: 'raisedOn', problem: 'The date on which it was found cannot lie in the future.' }])
+    throw new Invalid([
+      { field: 'raisedOn', problem: 'The date on which it was found cannot lie in the future.' },
+    ])
   return inTransaction(actor, async (scope) => {
     const home = await homes.getForChange(scope, reachOf(actor), input.homeId)
     demand(actor, 'homes.edit', home)

@@ -16,10 +16,9 @@ import { gatherDates, optionalDay, optionalPartialDate } from './date-fields'
 import { homeOf, IDENTITY_FIELDS, positionProblems } from './home-identity'
 import { refreshHomes } from './refresh-homes'
 
-const factFields = Object.fromEntries(FACT_KINDS.map((kind) => [kind, z.string().max(120).optional()])) as Record<
-  FactKind,
-  z.ZodOptional<z.ZodString>
->
+const factFields = Object.fromEntries(
+  FACT_KINDS.map((kind) => [kind, z.string().max(120).optional()]),
+) as Record<FactKind, z.ZodOptional<z.ZodString>>
 
 /** One home by a form: who and where it is, and as much of its wiring as is known, each fact under its kind's name. */
 export const AddHome = z.preprocess(
@@ -48,13 +47,25 @@ function check(input: AddHome, today: CalendarDay): GivenFact[] {
     }
   const { inspectedOn, nextDueOn } = input
   if (inspectedOn && inspectedOn.day > today)
-    problems.push({ field: 'inspectedOn', problem: 'The date of the last inspection cannot lie in the future.' })
+    problems.push({
+      field: 'inspectedOn',
+      problem: 'The date of the last inspection cannot lie in the future.',
+    })
   if (inspectedOn && input['inspection-record'] === 'never')
-    problems.push({ field: 'inspectedOn', problem: 'A home that was never inspected has no date of a last inspection.' })
+    problems.push({
+      field: 'inspectedOn',
+      problem: 'A home that was never inspected has no date of a last inspection.',
+    })
   if (nextDueOn && !inspectedOn)
-    problems.push({ field: 'nextDueOn', problem: 'Give the date of the last inspection too: the next date is counted with it.' })
+    problems.push({
+      field: 'nextDueOn',
+      problem: 'Give the date of the last inspection too: the next date is counted with it.',
+    })
   if (nextDueOn && inspectedOn && nextDueOn <= inspectedOn.day)
-    problems.push({ field: 'nextDueOn', problem: 'The next inspection date must lie after the last inspection.' })
+    problems.push({
+      field: 'nextDueOn',
+      problem: 'The next inspection date must lie after the last inspection.',
+    })
   if (problems.length > 0) throw new Invalid(problems)
   return facts
 }
@@ -67,15 +78,48 @@ async function write(
   today: CalendarDay,
 ): Promise<{ homeId: string }> {
   const { inspectedOn, nextDueOn } = input
-  const { kind, address, town, postcode, reference, uprn, nation, tenure, patch, block, latitude, longitude, note } = input
-  const identity = { kind, address, town, postcode, reference, uprn, nation, tenure, patch, block, latitude, longitude, note }
+  const {
+    kind,
+    address,
+    town,
+    postcode,
+    reference,
+    uprn,
+    nation,
+    tenure,
+    patch,
+    block,
+    latitude,
+    longitude,
+    note,
+  } = input
+  const identity = {
+    kind,
+    address,
+    town,
+    postcode,
+    reference,
+    uprn,
+    nation,
+    tenure,
+    patch,
+    block,
+    latitude,
+    longitude,
+    note,
+  }
   const home = await homeOf(scope, actor, newId(), identity)
   await homes.insertMany(scope, [home])
   const recorded = { homeId: home.id, source: 'officer' as const, recordedBy: actor.personId }
   const facts = agreeOnBoard(given, new Map())
   await homeFacts.insertMany(
     scope,
-    facts.map((fact) => ({ ...fact, ...recorded, id: newId(), asOf: { day: today, precision: 'day' as const } })),
+    facts.map((fact) => ({
+      ...fact,
+      ...recorded,
+      id: newId(),
+      asOf: { day: today, precision: 'day' as const },
+    })),
   )
   if (inspectedOn)
     await inspections.insertMany(scope, [

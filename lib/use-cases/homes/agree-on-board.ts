@@ -10,7 +10,8 @@ import { RCD_COVER_NAMES, type RcdCover } from '@/lib/homes/rcd-cover'
 type Correction = Pick<Fact, 'kind' | 'value' | 'asOf' | 'note'>
 type Known = ReadonlyMap<FactKind, { readonly value: string | null }>
 
-const knows = (value: string | null | undefined): value is string => typeof value === 'string' && value !== 'unknown'
+const knows = (value: string | null | undefined): value is string =>
+  typeof value === 'string' && value !== 'unknown'
 
 /** Whether a cover can be that of these ways. Where they show no RCD, one may still stand outside the board. */
 const coverAgrees = (told: string, shown: RcdCover) =>
@@ -22,7 +23,10 @@ const coverAgrees = (told: string, shown: RcdCover) =>
  * @returns the corrections, with those that the ways bring
  * @throws Invalid saying what contradicts what
  */
-export function agreeOnBoard<C extends Correction>(corrections: readonly C[], known: Known): (C | Correction)[] {
+export function agreeOnBoard<C extends Correction>(
+  corrections: readonly C[],
+  known: Known,
+): (C | Correction)[] {
   const given = new Map(corrections.map((one) => [one.kind, one]))
   const newWays = given.get('ways')
   const code = newWays ? newWays.value : (known.get('ways')?.value ?? null)
@@ -34,7 +38,9 @@ export function agreeOnBoard<C extends Correction>(corrections: readonly C[], kn
   const told = (kind: 'board-type' | 'rcd-cover') => given.get(kind)?.value
   const problems: FieldProblem[] = []
   const way = newWays ? 'The ways that you give' : 'The ways on record'
-  const cure = newWays ? 'Change one of the two.' : 'Correct the ways too, or empty them if they are not known.'
+  const cure = newWays
+    ? 'Change one of the two.'
+    : 'Correct the ways too, or empty them if they are not known.'
   const type = told('board-type')
   if (knows(type) && shownType !== 'unknown' && type !== shownType)
     problems.push({
@@ -57,7 +63,8 @@ export function agreeOnBoard<C extends Correction>(corrections: readonly C[], kn
   }
   if (shownType !== 'unknown') bring('board-type', shownType)
   const onRecord = known.get('rcd-cover')?.value
-  if (shownCover !== 'unknown' && !(knows(onRecord) && coverAgrees(onRecord, shownCover))) bring('rcd-cover', shownCover)
+  if (shownCover !== 'unknown' && !(knows(onRecord) && coverAgrees(onRecord, shownCover)))
+    bring('rcd-cover', shownCover)
   const replaced = new Set(brought.map((one) => one.kind))
   return [...corrections.filter((one) => !replaced.has(one.kind)), ...brought]
 }

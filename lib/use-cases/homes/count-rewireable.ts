@@ -14,7 +14,8 @@ export type RewireableByPatch = {
 export async function countRewireableByPatch(actor: Actor, _today: CalendarDay): Promise<RewireableByPatch> {
   demand(actor, 'homes.read')
   const patches = await counts.countByPatch(reading(actor), reachOf(actor))
-  const sum = (of: 'homes' | 'withRewireableWays' | 'unknown') => patches.reduce((total, patch) => total + patch[of], 0)
+  const sum = (of: 'homes' | 'withRewireableWays' | 'unknown') =>
+    patches.reduce((total, patch) => total + patch[of], 0)
   return {
     patches,
     totals: { homes: sum('homes'), withRewireableWays: sum('withRewireableWays'), unknown: sum('unknown') },

@@ -26,7 +26,8 @@ export const gatherDates = (names: readonly string[]) => (given: unknown) => {
 }
 
 /** "3", "March" or "mar" as the number of a month [1 to 12], else null. */
-const monthOf = (typed: string): number | null => (/^\d{1,2}$/.test(typed) ? Number(typed) : monthOfWord(typed))
+const monthOf = (typed: string): number | null =>
+  /^\d{1,2}$/.test(typed) ? Number(typed) : monthOfWord(typed)
 
 const typedOf = (iso: string): Typed => {
   const [year = '', month = '', day = ''] = iso.split('-')
@@ -40,12 +41,15 @@ function read({ day, month, year }: Typed): PartialDate | string {
   const number = monthOf(month)
   if (number === null || number < 1 || number > 12) return 'has a month that does not exist'
   if (day === '') return partly(Number(year), number, 1, 'month')
-  if (!/^\d{1,2}$/.test(day) || !isRealDay(Number(year), number, Number(day))) return 'does not exist in the calendar'
+  if (!/^\d{1,2}$/.test(day) || !isRealDay(Number(year), number, Number(day)))
+    return 'does not exist in the calendar'
   return partly(Number(year), number, Number(day), 'day')
 }
 
 const partly = (year: number, month: number, day: number, precision: Precision): PartialDate | string =>
-  year >= 1900 && year <= 2100 ? { day: dayOf(year, month, day), precision } : 'needs a year between 1900 and 2100'
+  year >= 1900 && year <= 2100
+    ? { day: dayOf(year, month, day), precision }
+    : 'needs a year between 1900 and 2100'
 
 const Typed = z.union([
   z
@@ -64,7 +68,10 @@ function readGiven(given: unknown, refuse: (problem: string) => void): PartialDa
   return undefined
 }
 
-const dateField = <Result>(what: string, finish: (date: PartialDate | undefined, refuse: (problem: string) => void) => Result) =>
+const dateField = <Result>(
+  what: string,
+  finish: (date: PartialDate | undefined, refuse: (problem: string) => void) => Result,
+) =>
   z.unknown().transform((given, context): Result => {
     let refused = false
     const refuse = (problem: string) => {
@@ -92,7 +99,8 @@ const toTheDay = (date: PartialDate | undefined, refuse: (problem: string) => vo
 export const partialDateField = (what: string) => dateField<PartialDate>(what, there)
 
 /** The same, or undefined where none was given. */
-export const optionalPartialDate = (what: string) => dateField<PartialDate | undefined>(what, (date) => date).optional()
+export const optionalPartialDate = (what: string) =>
+  dateField<PartialDate | undefined>(what, (date) => date).optional()
 
 /** A date that must be known to the day. @param what as for partialDateField */
 export const dayField = (what: string) =>

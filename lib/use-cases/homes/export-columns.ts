@@ -36,7 +36,10 @@ const OF_COLUMN: Record<Column, Exported> = {
   cover: [['RCD cover', (home) => RCD_COVER_NAMES[home.rcdCover]]],
   built: [['Built', (home) => yearBuiltInWords(home.built)]],
   inspected: [
-    ['Last inspection', (home) => (home.inspectionRecord === 'never' ? 'never' : partialDate(home.inspectedOn))],
+    [
+      'Last inspection',
+      (home) => (home.inspectionRecord === 'never' ? 'never' : partialDate(home.inspectedOn)),
+    ],
     ['Assessment', (home) => home.assessment],
   ],
   standing: [
@@ -57,7 +60,12 @@ const OF_COLUMN: Record<Column, Exported> = {
   patch: [['Patch', (home) => home.patch?.name ?? null]],
   block: [['Block', (home) => home.block?.name ?? null]],
   tenure: [['Tenure', (home) => TENURE_NAMES[home.tenure]]],
-  type: [['Dwelling', (home) => (home.kind === 'communal' ? 'Landlord supply' : DWELLING_TYPE_NAMES[home.dwellingType])]],
+  type: [
+    [
+      'Dwelling',
+      (home) => (home.kind === 'communal' ? 'Landlord supply' : DWELLING_TYPE_NAMES[home.dwellingType]),
+    ],
+  ],
   wiring: [['Wiring', (home) => WIRING_NAMES[home.wiring]]],
   rewired: [['Rewired', (home) => home.rewired]],
   bedrooms: [['Bedrooms', (home) => home.bedrooms]],
@@ -72,7 +80,8 @@ const exported = (columns: readonly Column[]): Exported => [
   ...COLUMNS.filter((column) => columns.includes(column)).flatMap((column) => OF_COLUMN[column]),
 ]
 
-export const exportHeadings = (columns: readonly Column[]): string[] => exported(columns).map(([heading]) => heading)
+export const exportHeadings = (columns: readonly Column[]): string[] =>
+  exported(columns).map(([heading]) => heading)
 
 export const exportCells = (home: HomeRow, columns: readonly Column[]): Cell[] =>
   exported(columns).map(([, cell]) => cell(home))

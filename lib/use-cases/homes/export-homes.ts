@@ -22,7 +22,11 @@ export type HomesExport = {
 /** How many homes are read at once: enough to be quick, few enough to be no burden. */
 const HOMES_A_READ = 1_000
 
-async function* rowsOf(scope: Scope, filter: HomeFilter, query: HomeQuery): AsyncIterable<readonly ExportCell[]> {
+async function* rowsOf(
+  scope: Scope,
+  filter: HomeFilter,
+  query: HomeQuery,
+): AsyncIterable<readonly ExportCell[]> {
   const standing = standingOn(filter.today, filter.noticeDays)
   let after: homeList.Place | null = null
   for (;;) {
@@ -55,7 +59,11 @@ export async function exportHomes(actor: Actor, query: HomeQuery, today: Calenda
       did: 'homes.exported',
       subjectKind: 'organisation',
       subjectId: actor.organisationId,
-      detail: { count, query: homeQueryText({ ...query, after: undefined, search: '' }), searched: query.search !== '' },
+      detail: {
+        count,
+        query: homeQueryText({ ...query, after: undefined, search: '' }),
+        searched: query.search !== '',
+      },
     }),
   )
   return { headings: exportHeadings(query.columns), count, rows: rowsOf(scope, filter, query) }

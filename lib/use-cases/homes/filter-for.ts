@@ -8,7 +8,12 @@ import { type HomeQuery } from '@/lib/homes/home-query'
 import { type HomeRow } from '@/lib/homes/home-row'
 
 /** What an actor asks of the register, narrowed to what they may see. */
-export const filterFor = (actor: Actor, query: HomeQuery, today: CalendarDay, noticeDays: number): HomeFilter => ({
+export const filterFor = (
+  actor: Actor,
+  query: HomeQuery,
+  today: CalendarDay,
+  noticeDays: number,
+): HomeFilter => ({
   reach: reachOf(actor),
   query,
   today,
@@ -26,7 +31,16 @@ export const standingOn =
 /** Whether a query lets every home through. */
 export const asksForAll = (query: HomeQuery): boolean =>
   query.search.trim() === '' &&
-  [query.patch, query.block, query.board, query.cover, query.standing, query.tenure, query.nation, query.defects].every(
-    (chosen) => chosen.length === 0,
-  ) &&
-  [query.builtFrom, query.builtTo, query.dueFrom, query.dueTo, query.within].every((bound) => bound === undefined)
+  [
+    query.patch,
+    query.block,
+    query.board,
+    query.cover,
+    query.standing,
+    query.tenure,
+    query.nation,
+    query.defects,
+  ].every((chosen) => chosen.length === 0) &&
+  [query.builtFrom, query.builtTo, query.dueFrom, query.dueTo, query.within].every(
+    (bound) => bound === undefined,
+  )

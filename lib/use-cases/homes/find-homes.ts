@@ -10,7 +10,9 @@ import { homeQueryOf } from '@/lib/homes/home-query'
 import { foldWords } from '@/lib/imports/fold-words'
 import { filterFor } from './filter-for'
 
-export const FindHomes = z.object({ q: z.string().trim().max(120, 'Use 120 characters or fewer.').default('') })
+export const FindHomes = z.object({
+  q: z.string().trim().max(120, 'Use 120 characters or fewer.').default(''),
+})
 
 export type FoundHome = {
   readonly id: string

@@ -17,12 +17,14 @@ import { readUprn } from '@/lib/imports/read-uprn'
 import { optionalLine, optionalLines } from './text-fields'
 
 const readBy = (read: (text: string) => Reading<string | null>, problem: string) =>
-  z.preprocess((given) => given ?? '', z.string()).transform((text, context): string | null => {
-    const reading = read(text)
-    if (reading.ok) return reading.value
-    context.addIssue({ code: 'custom', message: problem })
-    return z.NEVER
-  })
+  z
+    .preprocess((given) => given ?? '', z.string())
+    .transform((text, context): string | null => {
+      const reading = read(text)
+      if (reading.ok) return reading.value
+      context.addIssue({ code: 'custom', message: problem })
+      return z.NEVER
+    })
 
 const empty = (given: unknown) => (given === '' || given === undefined ? null : given)
 const degrees = (least: number, most: number, what: string) =>
@@ -40,12 +42,21 @@ export const IDENTITY_FIELDS = {
   kind: z.enum(['dwelling', 'communal']).default('dwelling'),
   address: oneLine('Write the first lines of the address, such as 12 Herring Row.', 200),
   town: optionalLine(120),
-  postcode: readBy(readPostcode, 'That is not a postcode. One looks like ZX1 2AB; take care with the letter O and the figure 0.'),
+  postcode: readBy(
+    readPostcode,
+    'That is not a postcode. One looks like ZX1 2AB; take care with the letter O and the figure 0.',
+  ),
   reference: optionalLine(60),
-  uprn: readBy(readUprn, 'That is not a UPRN: it is a number of up to 12 figures. Leave it empty if you do not have it.'),
+  uprn: readBy(
+    readUprn,
+    'That is not a UPRN: it is a number of up to 12 figures. Leave it empty if you do not have it.',
+  ),
   nation: z.enum(NATIONS, 'Choose the nation that the home is in: its law sets the inspection.'),
   tenure: z.enum(TENURES, 'Choose how the home is held; “Not known” is an answer.').default('unknown'),
-  patch: z.preprocess((given) => (given === 'none' ? null : empty(given)), z.uuid('Choose a patch from the list.').nullable()),
+  patch: z.preprocess(
+    (given) => (given === 'none' ? null : empty(given)),
+    z.uuid('Choose a patch from the list.').nullable(),
+  ),
   block: optionalLine(160),
   latitude: degrees(49, 62, 'latitude'),
   longitude: degrees(-12, 4, 'longitude'),
@@ -64,7 +75,12 @@ export function positionProblems({ latitude, longitude }: Identity): FieldProble
 async function patchIdOf(scope: WritingScope, actor: Actor, patch: string | null): Promise<string | null> {
   if (patch === null) {
     if (!reaches(actor, { patchId: null }))
-      throw new Invalid([{ field: 'patch', problem: 'Choose one of your patches: a home without a patch would be out of your sight.' }])
+      throw new Invalid([
+        {
+          field: 'patch',
+          problem: 'Choose one of your patches: a home without a patch would be out of your sight.',
+        },
+      ])
     return null
   }
   if (!reaches(actor, { patchId: patch })) throw new NotFound('That patch')
@@ -86,7 +102,10 @@ async function refuseTaken(scope: WritingScope, home: homes.Home): Promise<void>
   if (reference !== undefined && others.some((other) => other.reference?.toLowerCase() === reference))
     problems.push({ field: 'reference', problem: 'Another home in the register has this reference already.' })
   if (others.some((other) => other.addressKey === home.addressKey))
-    problems.push({ field: 'address', problem: 'A home with this address and postcode is in the register already.' })
+    problems.push({
+      field: 'address',
+      problem: 'A home with this address and postcode is in the register already.',
+    })
   if (problems.length > 0) throw new Invalid(problems)
 }
 
@@ -94,7 +113,12 @@ async function refuseTaken(scope: WritingScope, home: homes.Home): Promise<void>
  * The home that an identity makes, checked against the others of the organisation.
  * @throws Invalid where a UPRN, reference or address is taken; NotFound where the patch is not within reach
  */
-export async function homeOf(scope: WritingScope, actor: Actor, id: string, identity: Identity): Promise<homes.Home> {
+export async function homeOf(
+  scope: WritingScope,
+  actor: Actor,
+  id: string,
+  identity: Identity,
+): Promise<homes.Home> {
   const { patch, block, ...rest } = identity
   const home = {
     ...rest,

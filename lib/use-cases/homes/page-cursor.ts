@@ -3,7 +3,12 @@ import { z } from 'zod'
 import { fits, type Ordering, type Place } from '@/db/repositories/home-list'
 import { SORTS } from '@/lib/homes/home-query'
 
-const Cursor = z.tuple([z.enum(SORTS), z.enum(['asc', 'desc']), z.union([z.string(), z.number(), z.null()]), z.uuid()])
+const Cursor = z.tuple([
+  z.enum(SORTS),
+  z.enum(['asc', 'desc']),
+  z.union([z.string(), z.number(), z.null()]),
+  z.uuid(),
+])
 
 /** The cursor of the page that follows a place. */
 export const cursorOf = ({ sort, order }: Ordering, place: Place): string =>

@@ -74,15 +74,22 @@ export const RecordFactForm = z.preprocess(
     }),
 )
 
-type Correction = { readonly kind: FactKind; readonly value: string | null; readonly asOf: PartialDate | null; readonly note: string | null }
+type Correction = {
+  readonly kind: FactKind
+  readonly value: string | null
+  readonly asOf: PartialDate | null
+  readonly note: string | null
+}
 
 /** Each value as the register keeps it. @throws Invalid with every value that is none of its kind, or lies ahead */
 function corrections({ facts }: RecordFact, today: CalendarDay): Correction[] {
   const problems: FieldProblem[] = []
   const read: Correction[] = []
   for (const { kind, value, asOf, note } of facts) {
-    if (read.some((one) => one.kind === kind)) problems.push({ field: kind, problem: `${FACT_NAMES[kind]} is given twice.` })
-    if (asOf && asOf.day > today) problems.push({ field: 'asOf', problem: 'The date of a fact cannot lie in the future.' })
+    if (read.some((one) => one.kind === kind))
+      problems.push({ field: kind, problem: `${FACT_NAMES[kind]} is given twice.` })
+    if (asOf && asOf.day > today)
+      problems.push({ field: 'asOf', problem: 'The date of a fact cannot lie in the future.' })
     try {
       const { text } = readFactValue(kind, value)
       if ((kind === 'rewired' || kind === 'built') && (text?.match(/\d{4}/)?.[0] ?? '') > today.slice(0, 4))
@@ -97,23 +104,40 @@ function corrections({ facts }: RecordFact, today: CalendarDay): Correction[] {
   return read
 }
 
-function refuseWhereMovedOn(current: ReadonlyMap<FactKind, homeFacts.HomeFact>, seen: RecordFact['seen']): void {
-  const moved = FACT_KINDS.filter((kind) => seen[kind] !== undefined && seen[kind] !== (current.get(kind)?.id ?? null))
+function refuseWhereMovedOn(
+  current: ReadonlyMap<FactKind, homeFacts.HomeFact>,
+  seen: RecordFact['seen'],
+): void {
+  const moved = FACT_KINDS.filter(
+    (kind) => seen[kind] !== undefined && seen[kind] !== (current.get(kind)?.id ?? null),
+  )
   if (moved.length > 0)
     throw new Conflict(
       `${moved.map((kind) => FACT_NAMES[kind]).join(', ')}: somebody else has changed this since you opened the page. Read it again, then decide.`,
     )
 }
 
-async function write(scope: WritingScope, actor: Actor, input: RecordFact, today: CalendarDay): Promise<{ recorded: FactKind[] }> {
+async function write(
+  scope: WritingScope,
+  actor: Actor,
+  input: RecordFact,
+  today: CalendarDay,
+): Promise<{ recorded: FactKind[] }> {
   const home = await homes.getForChange(scope, reachOf(actor), input.homeId)
   demand(actor, 'homes.edit', home)
   const current = new Map((await homeFacts.listCurrent(scope, [home.id])).map((fact) => [fact.kind, fact]))
   const given = corrections(input, today)
   refuseWhereMovedOn(current, input.seen)
-  const changes = agreeOnBoard(given, current).filter(({ kind, value }) => (current.get(kind)?.value ?? null) !== value)
+  const changes = agreeOnBoard(given, current).filter(
+    ({ kind, value }) => (current.get(kind)?.value ?? null) !== value,
+  )
   if (changes.length === 0)
-    throw new Invalid([{ field: given[0]?.kind ?? '', problem: 'That is what the register holds already, so nothing was changed.' }])
+    throw new Invalid([
+      {
+        field: given[0]?.kind ?? '',
+        problem: 'That is what the register holds already, so nothing was changed.',
+      },
+    ])
   await homeFacts.supersede(
     scope,
     changes.flatMap(({ kind }) => current.get(kind) ?? []),
@@ -147,7 +171,11 @@ async function write(scope: WritingScope, actor: Actor, input: RecordFact, today
  * @throws NotFound, NotAllowed; Invalid where a value is none, contradicts the ways or changes nothing;
  * Conflict where a fact is no longer the one that was seen
  */
-export async function recordFact(actor: Actor, input: RecordFact, today: CalendarDay): Promise<{ recorded: FactKind[] }> {
+export async function recordFact(
+  actor: Actor,
+  input: RecordFact,
+  today: CalendarDay,
+): Promise<{ recorded: FactKind[] }> {
   demand(actor, 'homes.edit')
   return inTransaction(actor, (scope) => write(scope, actor, input, today))
 }

@@ -57,21 +57,32 @@ function check(input: RecordInspection, today: CalendarDay): void {
   if (nextDueOn && nextDueOn <= inspectedOn.day)
     problems.push({ field: 'nextDueOn', problem: 'The next inspection date must lie after the inspection.' })
   if (nextDueOn && nextDueOn > addYears(inspectedOn.day, LONGEST_TERM))
-    problems.push({ field: 'nextDueOn', problem: `The next inspection date lies more than ${LONGEST_TERM} years after the inspection. Check its year.` })
+    problems.push({
+      field: 'nextDueOn',
+      problem: `The next inspection date lies more than ${LONGEST_TERM} years after the inspection. Check its year.`,
+    })
   // An installation with a C1, C2 or FI is unsatisfactory by the model forms of BS 7671 Appendix 6 (common practice).
   if (assessment === 'satisfactory' && input.C1 + input.C2 + input.FI > 0)
     problems.push({
       field: 'assessment',
-      problem: 'A report with a C1, C2 or FI observation is unsatisfactory. Check the report: one of the two was copied wrongly.',
+      problem:
+        'A report with a C1, C2 or FI observation is unsatisfactory. Check the report: one of the two was copied wrongly.',
     })
   if (problems.length > 0) throw new Invalid(problems)
 }
 
-async function write(scope: WritingScope, actor: Actor, input: RecordInspection, today: CalendarDay): Promise<{ inspectionId: string }> {
+async function write(
+  scope: WritingScope,
+  actor: Actor,
+  input: RecordInspection,
+  today: CalendarDay,
+): Promise<{ inspectionId: string }> {
   const home = await homes.getForChange(scope, reachOf(actor), input.homeId)
   demand(actor, 'homes.edit', home)
   const { inspectedOn, assessment, note } = input
-  const twin = (await inspections.listLive(scope, [home.id])).find((one) => one.inspectedOn.day === inspectedOn.day)
+  const twin = (await inspections.listLive(scope, [home.id])).find(
+    (one) => one.inspectedOn.day === inspectedOn.day,
+  )
   if (twin) throw new Conflict('An inspection of that date is on record for this home already.')
   const inspectionId = newId()
   const shared = { homeId: home.id, source: 'officer' as const, recordedBy: actor.personId }
@@ -114,7 +125,11 @@ async function write(scope: WritingScope, actor: Actor, input: RecordInspection,
  * Puts an inspection on record, with a defect for each observation that it counts.
  * @throws NotFound, NotAllowed; Invalid where dates or counts cannot be; Conflict where that day's is on record
  */
-export async function recordInspection(actor: Actor, input: RecordInspection, today: CalendarDay): Promise<{ inspectionId: string }> {
+export async function recordInspection(
+  actor: Actor,
+  input: RecordInspection,
+  today: CalendarDay,
+): Promise<{ inspectionId: string }> {
   demand(actor, 'homes.edit')
   check(input, today)
   return inTransaction(actor, (scope) => write(scope, actor, input, today))

@@ -49,7 +49,9 @@ const kept = (score: number) => Math.round(score * 10_000) / 10_000
 
 const sameMonth = (a: CalendarDay, b: CalendarDay) => a.slice(0, 7) === b.slice(0, 7)
 
-type Next = Omit<assessments.NewAssessment, 'id' | 'beganOn' | 'explanation'> & { readonly explain: () => string }
+type Next = Omit<assessments.NewAssessment, 'id' | 'beganOn' | 'explanation'> & {
+  readonly explain: () => string
+}
 
 /** Which assessments to write, and whose current ones become history before that. */
 class Scoring {
@@ -69,7 +71,11 @@ class Scoring {
   }
 }
 
-async function refreshSome(scope: WritingScope, homeIds: readonly string[], today: CalendarDay): Promise<void> {
+async function refreshSome(
+  scope: WritingScope,
+  homeIds: readonly string[],
+  today: CalendarDay,
+): Promise<void> {
   const some = await homes.listByIds(scope, homeIds)
   const facts = byHome(await homeFacts.listCurrent(scope, homeIds))
   const reports = byHome(await inspections.listLive(scope, homeIds))
@@ -115,7 +121,11 @@ async function refreshSome(scope: WritingScope, homeIds: readonly string[], toda
  * a home calls it in the change's own transaction. A score made of other facts, or by another method, is a new
  * assessment beside those before it; one that only time moved is brought up to date, with a new one each month.
  */
-export async function refreshHomes(scope: WritingScope, homeIds: readonly string[], today: CalendarDay): Promise<void> {
+export async function refreshHomes(
+  scope: WritingScope,
+  homeIds: readonly string[],
+  today: CalendarDay,
+): Promise<void> {
   const each = [...new Set(homeIds)]
   for (let from = 0; from < each.length; from += HOMES_AT_ONCE)
     await refreshSome(scope, each.slice(from, from + HOMES_AT_ONCE), today)

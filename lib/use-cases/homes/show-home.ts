@@ -53,7 +53,13 @@ export type HomeOnRecord = {
   /** its place by score among the homes that the actor sees: 1 is the highest */
   readonly rank: { readonly place: number; readonly of: number }
   /** the oldest first */
-  readonly scoreHistory: readonly { readonly on: CalendarDay; readonly score: number; readonly low: number; readonly high: number; readonly methodVersion: string }[]
+  readonly scoreHistory: readonly {
+    readonly on: CalendarDay
+    readonly score: number
+    readonly low: number
+    readonly high: number
+    readonly methodVersion: string
+  }[]
   /** the other homes of its block within reach; null where it is in none */
   readonly neighbours: counts.NeighbourCounts | null
   readonly mayEdit: boolean
@@ -117,7 +123,13 @@ export async function showHome(actor: Actor, homeId: string, today: CalendarDay)
     assessment: explanation ? explanationFromText(explanation) : null,
     rank: { place: rank.higher + 1, of: rank.homes },
     scoreHistory: scores
-      .map(({ beganOn, score, low, high, methodVersion }) => ({ on: beganOn, score, low, high, methodVersion }))
+      .map(({ beganOn, score, low, high, methodVersion }) => ({
+        on: beganOn,
+        score,
+        low,
+        high,
+        methodVersion,
+      }))
       .reverse(),
     neighbours,
     mayEdit: can(actor, 'homes.edit'),

@@ -1,6 +1,12 @@
 import { z } from 'zod'
 import { reading } from '@/db/connection'
-import { type CellSize, listCells, listPoints, type MapCell, extent } from '@/db/repositories/home-register-map'
+import {
+  type CellSize,
+  listCells,
+  listPoints,
+  type MapCell,
+  extent,
+} from '@/db/repositories/home-register-map'
 import * as organisations from '@/db/repositories/organisations'
 import { type Actor } from '@/lib/access/actor'
 import { demand } from '@/lib/access/can'
@@ -22,7 +28,10 @@ export const MapView = z.object({
   box: text
     .pipe(z.tuple([degrees(180), degrees(90), degrees(180), degrees(90)], 'The box needs four numbers.'))
     .refine(([west, south, east, north]) => west <= east && south <= north, 'The box is upside down.'),
-  zoom: z.coerce.number('The zoom is a number.').min(0, 'The zoom starts at 0.').max(22, 'The zoom ends at 22.'),
+  zoom: z.coerce
+    .number('The zoom is a number.')
+    .min(0, 'The zoom starts at 0.')
+    .max(22, 'The zoom ends at 22.'),
 })
 
 export type MapCluster = {
@@ -79,7 +88,17 @@ function cellFor([west, south, east, north]: Box, zoom: number): CellSize {
 const overlap = (a: Box, b: Box | undefined): Box =>
   b ? [Math.max(a[0], b[0]), Math.max(a[1], b[1]), Math.min(a[2], b[2]), Math.min(a[3], b[3])] : a
 
-const toCluster = ({ longitude, latitude, west, south, east, north, homes, boards, highestScore }: MapCell): MapCluster => ({
+const toCluster = ({
+  longitude,
+  latitude,
+  west,
+  south,
+  east,
+  north,
+  homes,
+  boards,
+  highestScore,
+}: MapCell): MapCluster => ({
   longitude,
   latitude,
   box: [west, south, east, north],
@@ -101,7 +120,10 @@ export async function mapHomes(
   const scope = reading(actor)
   const { noticeDays } = await organisations.get(scope)
   const whole = filterFor(actor, query, today, noticeDays)
-  const seen = { ...whole, query: { ...query, within: [...overlap(box, query.within)] as [number, number, number, number] } }
+  const seen = {
+    ...whole,
+    query: { ...query, within: [...overlap(box, query.within)] as [number, number, number, number] },
+  }
   const [all, cells] = await Promise.all([
     extent(scope, whole),
     listCells(scope, seen, cellFor(box, zoom), MOST_ACROSS * MOST_ACROSS + 2 * MOST_ACROSS + 1),

@@ -52,17 +52,16 @@ function firstStepOf(actor: Actor, homes: number): Today['firstStep'] {
   return can(actor, 'imports.run') ? 'import' : 'ask-a-manager'
 }
 
-/** What must be done now: standing, the due line, what is dangerous, and where to look first. Nine statements at most. */
+/** What must be done now: standing, the due line, what is dangerous, and where to look first. Eight statements at most. */
 export async function showToday(actor: Actor, today: CalendarDay): Promise<Today> {
   demand(actor, 'homes.read')
   const scope = reading(actor)
   const reach = reachOf(actor)
   const { noticeDays } = await organisations.get(scope)
   const monday = mondayOf(today)
-  const [standing, days, dangerous, patches, worstIds, c1Ids, c2] = await Promise.all([
+  const [{ standing, danger }, days, patches, worstIds, c1Ids, c2] = await Promise.all([
     counts.countByStanding(scope, reach, today, noticeDays),
     counts.countByDueDay(scope, reach, addDays(monday, -7 * WEEKS_BACK), addDays(monday, 7 * WEEKS_ON - 1)),
-    ranks.countDangerous(scope, reach),
     counts.countByPatch(scope, reach),
     ranks.listWorst(scope, reach, MOST_WORST),
     ranks.listWorst(scope, reach, MOST_C1, 'C1'),
@@ -80,7 +79,7 @@ export async function showToday(actor: Actor, today: CalendarDay): Promise<Today
     noticeDays,
     weeks: dueWeeks(days, today, { weeksBack: WEEKS_BACK, weeksOn: WEEKS_ON }),
     danger: {
-      ...dangerous,
+      ...danger,
       worstC1: pick(c1Ids),
       oldestC2: c2.flatMap(({ homeId, raisedOn }) => {
         const home = byId.get(homeId)

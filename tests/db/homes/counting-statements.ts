@@ -1,7 +1,9 @@
 import { pool } from '@/db/knex'
 
 /** Runs some work and counts the statements that it sends to the database. */
-export async function countingStatements<T>(work: () => Promise<T>): Promise<{ result: T; statements: string[] }> {
+export async function countingStatements<T>(
+  work: () => Promise<T>,
+): Promise<{ result: T; statements: string[] }> {
   const statements: string[] = []
   const note = ({ sql }: { sql: string }) => void statements.push(sql)
   pool().on('query', note)

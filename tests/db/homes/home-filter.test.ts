@@ -38,13 +38,18 @@ function couldBeBuilt({ built }: HomeRow, from?: number, to?: number): boolean {
 }
 
 const dueBetween = (dueOn: CalendarDay | null, from?: string, to?: string) =>
-  (from === undefined || (dueOn !== null && dueOn >= from)) && (to === undefined || (dueOn !== null && dueOn <= to))
+  (from === undefined || (dueOn !== null && dueOn >= from)) &&
+  (to === undefined || (dueOn !== null && dueOn <= to))
 
 function isWithin({ place }: HomeRow, within: HomeQuery['within']): boolean {
   if (!within) return true
   const [west, south, east, north] = within
   return (
-    place !== null && place.longitude >= west && place.longitude <= east && place.latitude >= south && place.latitude <= north
+    place !== null &&
+    place.longitude >= west &&
+    place.longitude <= east &&
+    place.latitude >= south &&
+    place.latitude <= north
   )
 }
 
@@ -57,7 +62,9 @@ const letsThrough = (home: HomeRow, query: HomeQuery): boolean =>
   has(query.tenure, home.tenure) &&
   has(query.nation, home.nation) &&
   (query.defects.length === 0 ||
-    query.defects.some((code) => (code === 'any' ? Object.values(home.open).some((open) => open > 0) : home.open[code] > 0))) &&
+    query.defects.some((code) =>
+      code === 'any' ? Object.values(home.open).some((open) => open > 0) : home.open[code] > 0,
+    )) &&
   couldBeBuilt(home, query.builtFrom, query.builtTo) &&
   dueBetween(home.dueOn, query.dueFrom, query.dueTo) &&
   isWithin(home, query.within)
@@ -67,11 +74,15 @@ const some = <T>(values: readonly T[]) =>
     { weight: 5, arbitrary: fc.constant<T[]>([]) },
     { weight: 1, arbitrary: fc.subarray([...values], { maxLength: Math.min(3, values.length) }) },
   )
-const day = fc.date({ min: new Date('2020-01-01'), max: new Date('2033-01-01'), noInvalidDate: true }).map((date) => date.toISOString().slice(0, 10))
+const day = fc
+  .date({ min: new Date('2020-01-01'), max: new Date('2033-01-01'), noInvalidDate: true })
+  .map((date) => date.toISOString().slice(0, 10))
 const maybe = <T>(arbitrary: fc.Arbitrary<T>) => fc.option(arbitrary, { nil: undefined, freq: 2 })
 
 const aQuery = () => {
-  const ids = (of: (home: HomeRow) => string | undefined) => [...new Set(every.flatMap((home) => of(home) ?? []))]
+  const ids = (of: (home: HomeRow) => string | undefined) => [
+    ...new Set(every.flatMap((home) => of(home) ?? [])),
+  ]
   return fc.record({
     patch: some([...ids((home) => home.patch?.id), 'none' as const]),
     block: some(ids((home) => home.block?.id)),
@@ -84,7 +95,13 @@ const aQuery = () => {
     builtTo: maybe(fc.integer({ min: 1880, max: 2020 })),
     dueFrom: maybe(day),
     dueTo: maybe(day),
-    within: maybe(fc.constantFrom<[number, number, number, number]>([0.9, 53.4, 0.91, 53.41], [0.905, 53.401, 0.905, 53.402], [-1, 50, 2, 55])),
+    within: maybe(
+      fc.constantFrom<[number, number, number, number]>(
+        [0.9, 53.4, 0.91, 53.41],
+        [0.905, 53.401, 0.905, 53.402],
+        [-1, 50, 2, 55],
+      ),
+    ),
   })
 }
 
@@ -95,7 +112,13 @@ describe('the filter', () => {
       fc.asyncProperty(aQuery(), async (given) => {
         const query = HomeQuery.parse(given)
         const filter = filterFor(organisation.manager, query, TODAY, NOTICE_DAYS)
-        const places = await homeList.listPlaces(reading(organisation.manager), filter, { sort: 'due', order: 'asc' }, null, 1_000)
+        const places = await homeList.listPlaces(
+          reading(organisation.manager),
+          filter,
+          { sort: 'due', order: 'asc' },
+          null,
+          1_000,
+        )
         const wanted = every.filter((home) => letsThrough(home, query)).map((home) => home.id)
         expect(places.map((place) => place.id).toSorted()).toEqual(wanted.toSorted())
         expect(await homeList.count(reading(organisation.manager), filter)).toBe(wanted.length)
@@ -108,7 +131,10 @@ describe('the filter', () => {
 
   it('finds every standing, and counts each home in one of them', async () => {
     const totals = await Promise.all(
-      STANDINGS.map(async (standing) => (await listHomes(organisation.manager, { ...homeQueryOf({}), standing: [standing] }, TODAY)).total),
+      STANDINGS.map(
+        async (standing) =>
+          (await listHomes(organisation.manager, { ...homeQueryOf({}), standing: [standing] }, TODAY)).total,
+      ),
     )
     expect(totals.every((total) => total > 0)).toBe(true)
     expect(totals.reduce((sum, total) => sum + total, 0)).toBe(every.length)

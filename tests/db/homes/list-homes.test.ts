@@ -64,7 +64,9 @@ describe('pages of the list', () => {
     for (const sort of ['score', 'address'] as const) {
       const [up, down] = await Promise.all(
         (['asc', 'desc'] as const).map(async (order) =>
-          (await everyPage(organisation.manager, query({ sort, order }))).flatMap((page) => page.rows.map((home) => home.id)),
+          (await everyPage(organisation.manager, query({ sort, order }))).flatMap((page) =>
+            page.rows.map((home) => home.id),
+          ),
         ),
       )
       expect(up).toEqual(down?.toReversed())
@@ -80,8 +82,12 @@ describe('pages of the list', () => {
   })
 
   it('keep a street together, and its numbers in order', async () => {
-    const rows = (await everyPage(organisation.manager, query({ sort: 'address', order: 'asc' }))).flatMap((page) => page.rows)
-    const lantern = rows.filter((home) => home.address.endsWith(' Lantern Row')).map((home) => Number.parseInt(home.address))
+    const rows = (await everyPage(organisation.manager, query({ sort: 'address', order: 'asc' }))).flatMap(
+      (page) => page.rows,
+    )
+    const lantern = rows
+      .filter((home) => home.address.endsWith(' Lantern Row'))
+      .map((home) => Number.parseInt(home.address))
     expect(lantern).toEqual(lantern.toSorted((a, b) => a - b))
     expect(lantern.length).toBe(160)
   })
@@ -91,8 +97,14 @@ describe('pages of the list', () => {
     ['no JSON', Buffer.from('nothing').toString('base64url')],
     ['another shape', Buffer.from('{"id":1}').toString('base64url')],
     ['no id', Buffer.from('["score","desc",1,"x"]').toString('base64url')],
-    ['a text where a number belongs', Buffer.from('["score","desc","1","0193f2a0-7b3a-7c11-8d5e-000000000001"]').toString('base64url')],
-    ['nothing where a score belongs', Buffer.from('["score","desc",null,"0193f2a0-7b3a-7c11-8d5e-000000000001"]').toString('base64url')],
+    [
+      'a text where a number belongs',
+      Buffer.from('["score","desc","1","0193f2a0-7b3a-7c11-8d5e-000000000001"]').toString('base64url'),
+    ],
+    [
+      'nothing where a score belongs',
+      Buffer.from('["score","desc",null,"0193f2a0-7b3a-7c11-8d5e-000000000001"]').toString('base64url'),
+    ],
   ])('begin with the first where the cursor is %s', async (_, after) => {
     const [first, other] = await Promise.all([
       listHomes(organisation.manager, query(), TODAY),
@@ -130,7 +142,12 @@ describe('pages of the list', () => {
   })
 
   it.each(SORTS)('take ten statements at most, by %s', async (sort) => {
-    const asked = query({ sort, search: 'row', board: ['rewireable-ways', 'unknown'], standing: ['lapsed', 'unknown date'] })
+    const asked = query({
+      sort,
+      search: 'row',
+      board: ['rewireable-ways', 'unknown'],
+      standing: ['lapsed', 'unknown date'],
+    })
     const { statements } = await countingStatements(() => listHomes(organisation.manager, asked, TODAY))
     expect(statements.length).toBeGreaterThan(3)
     expect(statements.length).toBeLessThanOrEqual(10)
@@ -138,6 +155,12 @@ describe('pages of the list', () => {
 
   it('are empty for a register that is', async () => {
     const { manager } = await (await import('@/tests/builders/an-organisation')).anOrganisation()
-    expect(await listHomes(manager, query(), TODAY)).toEqual({ rows: [], next: null, total: 0, all: 0, answer: null })
+    expect(await listHomes(manager, query(), TODAY)).toEqual({
+      rows: [],
+      next: null,
+      total: 0,
+      all: 0,
+      answer: null,
+    })
   })
 })

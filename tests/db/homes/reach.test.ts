@@ -57,7 +57,13 @@ beforeAll(async () => {
   inNorth = await added(victim, '1 Secret Street', victim.patches.north)
   inSouth = await added(victim, '2 Secret Street', victim.patches.south)
   inNone = await added(victim, '3 Secret Street', null)
-  const given = { homeId: inSouth, code: 'C2' as const, description: 'A cracked socket', location: null, raisedOn: undefined }
+  const given = {
+    homeId: inSouth,
+    code: 'C2' as const,
+    description: 'A cracked socket',
+    location: null,
+    raisedOn: undefined,
+  }
   ;({ defectId } = await addDefect(victim.manager, given, TODAY))
 })
 
@@ -85,11 +91,39 @@ async function everythingSeenBy(actor: Actor) {
 
 const writes = (actor: Actor, homeId: string): [string, () => Promise<unknown>][] => [
   ['show', () => showHome(actor, homeId, TODAY)],
-  ['record a fact', () => recordFact(actor, { homeId, facts: [{ kind: 'bedrooms', value: '3', asOf: undefined, note: null }], seen: {} }, TODAY)],
-  ['record an inspection', () => recordInspection(actor, RecordInspection.parse({ homeId, inspectedOn: '2024-01-01' }), TODAY)],
-  ['add a defect', () => addDefect(actor, { homeId, code: 'C1', description: 'x', location: null, raisedOn: undefined }, TODAY)],
+  [
+    'record a fact',
+    () =>
+      recordFact(
+        actor,
+        { homeId, facts: [{ kind: 'bedrooms', value: '3', asOf: undefined, note: null }], seen: {} },
+        TODAY,
+      ),
+  ],
+  [
+    'record an inspection',
+    () => recordInspection(actor, RecordInspection.parse({ homeId, inspectedOn: '2024-01-01' }), TODAY),
+  ],
+  [
+    'add a defect',
+    () =>
+      addDefect(actor, { homeId, code: 'C1', description: 'x', location: null, raisedOn: undefined }, TODAY),
+  ],
   ['close a defect', () => closeDefect(actor, { homeId, defectId, closedOn: TODAY, note: 'x' }, TODAY)],
-  ['change', () => changeHome(actor, ChangeHome.parse({ homeId, address: '9 New Street', nation: 'england', patch: actor.patches === 'all' ? '' : actor.patches[0] }), TODAY)],
+  [
+    'change',
+    () =>
+      changeHome(
+        actor,
+        ChangeHome.parse({
+          homeId,
+          address: '9 New Street',
+          nation: 'england',
+          patch: actor.patches === 'all' ? '' : actor.patches[0],
+        }),
+        TODAY,
+      ),
+  ],
 ]
 
 const registerOf = ({ organisationId }: AnOrganisation) =>
@@ -119,17 +153,30 @@ describe('another organisation', () => {
   })
 
   it('cannot put its home into a patch of the victim', async () => {
-    await expect(added(attacker, '5 Own Street', victim.patches.north)).rejects.toEqual(new NotFound('That patch'))
+    await expect(added(attacker, '5 Own Street', victim.patches.north)).rejects.toEqual(
+      new NotFound('That patch'),
+    )
   })
 
   it('may use the UPRN, reference and address of the victim’s homes', async () => {
     const form = (owner: AnOrganisation) =>
-      addHome(owner.manager, AddHome.parse({ address: '7 Same Street', postcode: 'ZX1 2AB', nation: 'england', uprn: '990000000007', reference: 'SAME' }), TODAY)
+      addHome(
+        owner.manager,
+        AddHome.parse({
+          address: '7 Same Street',
+          postcode: 'ZX1 2AB',
+          nation: 'england',
+          uprn: '990000000007',
+          reference: 'SAME',
+        }),
+        TODAY,
+      )
     await form(victim)
     const { homeId } = await form(attacker)
     expect(homeId).toMatch(/^[0-9a-f-]{36}$/)
     await pool()('assessments').where({ home_id: homeId }).delete()
-    for (const table of ['home_register', 'home_facts']) await pool()(table).where({ home_id: homeId }).delete()
+    for (const table of ['home_register', 'home_facts'])
+      await pool()(table).where({ home_id: homeId }).delete()
     await pool()('homes').where({ id: homeId }).delete()
   })
 })
@@ -147,7 +194,8 @@ describe('an officer of another patch', () => {
       blocks: [{ name: 'Secret House', homes: 1 }],
     })
     expect(seen.rewireable.totals).toEqual({ homes: 1, withRewireableWays: 1, unknown: 0 })
-    for (const map of seen.map) expect(map).toMatchObject({ clusters: [], points: [{ id: inNorth }], inBox: 1, placed: 1 })
+    for (const map of seen.map)
+      expect(map).toMatchObject({ clusters: [], points: [{ id: inNorth }], inBox: 1, placed: 1 })
     expect(seen.today).toMatchObject({ homes: 1, danger: { withC2: 0, oldestC2: [] } })
     expect(seen.exported).toHaveLength(1)
     const shown = await showHome(victim.officer, inNorth, TODAY)
@@ -165,7 +213,11 @@ describe('an officer of another patch', () => {
 
   it('cannot move a home out of sight', async () => {
     const change = (patch: string) =>
-      changeHome(victim.officer, ChangeHome.parse({ homeId: inNorth, address: '1 Secret Street', nation: 'england', patch }), TODAY)
+      changeHome(
+        victim.officer,
+        ChangeHome.parse({ homeId: inNorth, address: '1 Secret Street', nation: 'england', patch }),
+        TODAY,
+      )
     await expect(change(victim.patches.south)).rejects.toEqual(new NotFound('That patch'))
     await expect(change('')).rejects.toMatchObject({ kind: 'invalid', problems: [{ field: 'patch' }] })
   })
@@ -183,7 +235,9 @@ describe('a role that may not', () => {
   it('is refused, and the auditor changes nothing', async () => {
     for (const [what, act] of writes(victim.auditor, inNorth).slice(1))
       await expect(act(), what).rejects.toEqual(new NotAllowed())
-    await expect(addHome(victim.officer, AddHome.parse({ address: '8 New Street', nation: 'england' }), TODAY)).rejects.toEqual(new NotAllowed())
+    await expect(
+      addHome(victim.officer, AddHome.parse({ address: '8 New Street', nation: 'england' }), TODAY),
+    ).rejects.toEqual(new NotAllowed())
     expect((await showHome(victim.auditor, inSouth, TODAY)).mayEdit).toBe(false)
     expect((await showHome(victim.manager, inSouth, TODAY)).mayEdit).toBe(true)
   })

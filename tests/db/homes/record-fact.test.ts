@@ -28,10 +28,18 @@ beforeEach(async () => {
 
 const shown = () => showHome(organisation.manager, homeId, TODAY)
 const factOf = (home: HomeOnRecord, kind: FactKind) => home.facts.find((fact) => fact.kind === kind)
-const record = (facts: Partial<Record<FactKind, string | null>>, seen: RecordFact['seen'] = {}, actor = organisation.officer) =>
+const record = (
+  facts: Partial<Record<FactKind, string | null>>,
+  seen: RecordFact['seen'] = {},
+  actor = organisation.officer,
+) =>
   recordFact(
     actor,
-    RecordFact.parse({ homeId, facts: Object.entries(facts).map(([kind, value]) => ({ kind, value })), seen }),
+    RecordFact.parse({
+      homeId,
+      facts: Object.entries(facts).map(([kind, value]) => ({ kind, value })),
+      seen,
+    }),
     TODAY,
   )
 const problemsOf = (act: Promise<unknown>) =>
@@ -46,8 +54,19 @@ describe('a correction', () => {
     expect(await record({ 'board-type': 'rewireable' })).toEqual({ recorded: ['board-type'] })
     const after = await shown()
     expect(factOf(after, 'board-type')).toMatchObject({
-      current: { value: 'rewireable', source: 'officer', recordedBy: organisation.officer.name, asOf: { day: TODAY, precision: 'day' } },
-      before: [{ value: 'breakers', recordedBy: organisation.manager.name, id: factOf(before, 'board-type')?.current?.id }],
+      current: {
+        value: 'rewireable',
+        source: 'officer',
+        recordedBy: organisation.officer.name,
+        asOf: { day: TODAY, precision: 'day' },
+      },
+      before: [
+        {
+          value: 'breakers',
+          recordedBy: organisation.manager.name,
+          id: factOf(before, 'board-type')?.current?.id,
+        },
+      ],
     })
     expect(after.home.boardType).toBe('rewireable')
     expect(after.home.score).toBeGreaterThan(before.home.score)
@@ -58,9 +77,21 @@ describe('a correction', () => {
   it('goes on the audit trail, once a fact', async () => {
     await record({ bedrooms: '3', wiring: 'rubber' })
     const entries = await audit.list(reading(organisation.manager), { subjectId: homeId, limit: 2 })
-    expect(entries.map(({ did, detail, actorId }) => ({ did, detail, actorId })).toSorted((a, b) => String(a.detail.kind).localeCompare(String(b.detail.kind)))).toEqual([
-      { did: 'home.fact-recorded', detail: { kind: 'bedrooms', from: null, to: '3' }, actorId: organisation.officer.personId },
-      { did: 'home.fact-recorded', detail: { kind: 'wiring', from: null, to: 'rubber' }, actorId: organisation.officer.personId },
+    expect(
+      entries
+        .map(({ did, detail, actorId }) => ({ did, detail, actorId }))
+        .toSorted((a, b) => String(a.detail.kind).localeCompare(String(b.detail.kind))),
+    ).toEqual([
+      {
+        did: 'home.fact-recorded',
+        detail: { kind: 'bedrooms', from: null, to: '3' },
+        actorId: organisation.officer.personId,
+      },
+      {
+        did: 'home.fact-recorded',
+        detail: { kind: 'wiring', from: null, to: 'rubber' },
+        actorId: organisation.officer.personId,
+      },
     ])
   })
 
@@ -99,7 +130,9 @@ describe('two who correct at once', () => {
   it('the second is told, where it had seen the fact before', async () => {
     const seen = { 'board-type': factOf(await shown(), 'board-type')?.current?.id ?? null }
     await record({ 'board-type': 'rewireable' }, seen)
-    await expect(record({ 'board-type': 'rcbo' }, seen, organisation.manager)).rejects.toBeInstanceOf(Conflict)
+    await expect(record({ 'board-type': 'rcbo' }, seen, organisation.manager)).rejects.toBeInstanceOf(
+      Conflict,
+    )
     expect((await shown()).home.boardType).toBe('rewireable')
   })
 
@@ -123,12 +156,18 @@ describe('two who correct at once', () => {
 
 describe('the facts of a consumer unit', () => {
   it('follow new ways', async () => {
-    expect((await record({ ways: 'RRR[BB]', 'rcd-cover': null })).recorded.toSorted()).toEqual(['board-type', 'rcd-cover', 'ways'])
+    expect((await record({ ways: 'RRR[BB]', 'rcd-cover': null })).recorded.toSorted()).toEqual([
+      'board-type',
+      'rcd-cover',
+      'ways',
+    ])
     expect((await shown()).home).toMatchObject({ ways: 'RRR[BB]', boardType: 'mixed', rcdCover: 'part' })
   })
 
   it('may not contradict new ways', async () => {
-    await expect(record({ ways: 'RRRR', 'board-type': 'breakers' })).rejects.toThrow(/4 rewireable.*“Rewireable fuses”, not “Circuit breakers”/)
+    await expect(record({ ways: 'RRRR', 'board-type': 'breakers' })).rejects.toThrow(
+      /4 rewireable.*“Rewireable fuses”, not “Circuit breakers”/,
+    )
     expect(await problemsOf(record({ ways: '[BBBB]', 'rcd-cover': 'none' }))).toEqual(['rcd-cover'])
   })
 
@@ -148,19 +187,42 @@ describe('the facts of a consumer unit', () => {
 
 describe('the form', () => {
   it('reads a field for each kind, a date in three parts and what was on screen', () => {
-    const form = { homeId, 'board-type': 'rewireable', bedrooms: '', 'seen-board-type': homeId, 'seen-bedrooms': '', 'asOf-day': '', 'asOf-month': 'Mar', 'asOf-year': '2021', note: ' seen  on site ' }
+    const form = {
+      homeId,
+      'board-type': 'rewireable',
+      bedrooms: '',
+      'seen-board-type': homeId,
+      'seen-bedrooms': '',
+      'asOf-day': '',
+      'asOf-month': 'Mar',
+      'asOf-year': '2021',
+      note: ' seen  on site ',
+    }
     expect(RecordFactForm.parse(form)).toEqual({
       homeId,
       facts: [
-        { kind: 'board-type', value: 'rewireable', asOf: { day: '2021-03-01', precision: 'month' }, note: 'seen on site' },
-        { kind: 'bedrooms', value: '', asOf: { day: '2021-03-01', precision: 'month' }, note: 'seen on site' },
+        {
+          kind: 'board-type',
+          value: 'rewireable',
+          asOf: { day: '2021-03-01', precision: 'month' },
+          note: 'seen on site',
+        },
+        {
+          kind: 'bedrooms',
+          value: '',
+          asOf: { day: '2021-03-01', precision: 'month' },
+          note: 'seen on site',
+        },
       ],
       seen: { 'board-type': homeId, bedrooms: null },
     })
   })
 
   it.each([
-    [{ 'asOf-day': '31', 'asOf-month': '2', 'asOf-year': '2021' }, 'The date does not exist in the calendar.'],
+    [
+      { 'asOf-day': '31', 'asOf-month': '2', 'asOf-year': '2021' },
+      'The date does not exist in the calendar.',
+    ],
     [{ 'asOf-day': '1', 'asOf-month': '', 'asOf-year': '2021' }, 'The date has a day but no month.'],
     [{ 'asOf-month': '13', 'asOf-year': '2021' }, 'The date has a month that does not exist.'],
     [{ 'asOf-year': '21' }, 'The date needs a year with four digits, such as 2021.'],

@@ -25,8 +25,15 @@ beforeAll(async () => {
 
 const ofOrganisation = (table: string, { organisationId }: AnOrganisation = organisation) =>
   pool()(table).where({ organisation_id: organisationId })
-const register = () => ofOrganisation('home_register').orderBy('home_id').select('home_id', 'score', 'score_low', 'score_high', 'due_on', 'board_type')
-const current = () => ofOrganisation('assessments').where({ is_current: true }).orderBy('home_id').select('home_id', 'id', 'score')
+const register = () =>
+  ofOrganisation('home_register')
+    .orderBy('home_id')
+    .select('home_id', 'score', 'score_low', 'score_high', 'due_on', 'board_type')
+const current = () =>
+  ofOrganisation('assessments')
+    .where({ is_current: true })
+    .orderBy('home_id')
+    .select('home_id', 'id', 'score')
 
 describe('scoring an organisation anew', () => {
   it('gives each home its row and its assessment, tells how far it is, and leaves other organisations alone', async () => {
@@ -38,7 +45,9 @@ describe('scoring an organisation anew', () => {
     ])
     const [rows, scores] = [await register(), await current()]
     expect(rows).toHaveLength(1_150)
-    expect(scores.map(({ home_id, score }) => [home_id, score])).toEqual(rows.map(({ home_id, score }) => [home_id, score]))
+    expect(scores.map(({ home_id, score }) => [home_id, score])).toEqual(
+      rows.map(({ home_id, score }) => [home_id, score]),
+    )
     expect(await ofOrganisation('home_register', other)).toEqual([])
   })
 
@@ -52,7 +61,9 @@ describe('scoring an organisation anew', () => {
     for (const { home_id } of (await register()).slice(0, 25)) {
       const { home, assessment } = await showHome(organisation.manager, home_id, TODAY)
       expect(assessment).toEqual(assess(home, FIRST_METHOD, TODAY))
-      const kept = [assessment?.score, assessment?.low, assessment?.high].map((score) => Number(score?.toFixed(4)))
+      const kept = [assessment?.score, assessment?.low, assessment?.high].map((score) =>
+        Number(score?.toFixed(4)),
+      )
       expect([home.score, home.scoreLow, home.scoreHigh]).toEqual(kept)
     }
   })
@@ -68,7 +79,9 @@ describe('scoring an organisation anew', () => {
     const nextMonth = await current()
     const moved = nextMonth.filter(({ id }, at) => id !== later[at]?.id)
     expect(moved.length).toBeGreaterThan(100)
-    expect(Number((await ofOrganisation('assessments').count({ rows: '*' }))[0]?.rows)).toBe(1_150 + moved.length)
+    expect(Number((await ofOrganisation('assessments').count({ rows: '*' }))[0]?.rows)).toBe(
+      1_150 + moved.length,
+    )
     const { scoreHistory, assessment } = await showHome(organisation.manager, moved[0]?.home_id ?? '', TODAY)
     expect(scoreHistory.map(({ on }) => on)).toEqual(['2026-12-01', '2027-01-04'])
     expect(Number(assessment?.score.toFixed(4))).toBe(scoreHistory.at(-1)?.score)
@@ -86,12 +99,16 @@ describe('refreshing homes', () => {
 
   it('takes few statements, however many homes', async () => {
     const ids = await homes.listIdsAfter(reading(organisation), null, 1_000)
-    const { statements } = await countingStatements(() => inTransaction(organisation, (scope) => refreshHomes(scope, ids, calendarDay('2027-02-01'))))
+    const { statements } = await countingStatements(() =>
+      inTransaction(organisation, (scope) => refreshHomes(scope, ids, calendarDay('2027-02-01'))),
+    )
     expect(statements.length).toBeLessThanOrEqual(14)
   })
 
   it('of none does nothing', async () => {
-    const { statements } = await countingStatements(() => inTransaction(organisation, (scope) => refreshHomes(scope, [], TODAY)))
+    const { statements } = await countingStatements(() =>
+      inTransaction(organisation, (scope) => refreshHomes(scope, [], TODAY)),
+    )
     expect(statements.filter((sql) => !/^(begin|commit|set transaction)/i.test(sql))).toEqual([])
   })
 

@@ -36,19 +36,30 @@ beforeAll(async () => {
   const made = [
     home({ address: '12 Herring Row', postcode: 'ZX1 2AB', uprn: '990012345678', reference: 'QH-0012' }),
     home({ address: '112 Herring Row', postcode: 'ZX1 2AB', uprn: '990012345679', reference: 'QH-0112' }),
-    home({ address: 'Flat 3, 9 St Mary’s Gardens', postcode: 'ZX12 3CD', uprn: '12345678', reference: 'MB/7 a' }),
+    home({
+      address: 'Flat 3, 9 St Mary’s Gardens',
+      postcode: 'ZX12 3CD',
+      uprn: '12345678',
+      reference: 'MB/7 a',
+    }),
     home({ address: '4 Ffordd y Môr', town: 'Marram Bay', postcode: 'YX4 5EF', reference: '100%' }),
     home({ address: '5 Under_score Way', postcode: null, reference: 'A_1' }),
     home({ address: '12 Copper Lane', postcode: 'WX9 9ZZ', patchId: organisation.patches.south }),
   ]
   await inTransaction(organisation, async (scope) => {
     await homes.insertMany(scope, made)
-    await refreshHomes(scope, made.map((one) => one.id), TODAY)
+    await refreshHomes(
+      scope,
+      made.map((one) => one.id),
+      TODAY,
+    )
   })
 })
 
 const addresses = async (search: string, given: Partial<HomeQuery> = {}) =>
-  (await listHomes(organisation.manager, { ...homeQueryOf({}), ...given, search }, TODAY)).rows.map((row) => row.address).toSorted()
+  (await listHomes(organisation.manager, { ...homeQueryOf({}), ...given, search }, TODAY)).rows
+    .map((row) => row.address)
+    .toSorted()
 
 describe('search', () => {
   it.each([
@@ -72,7 +83,17 @@ describe('search', () => {
     ['marram', ['4 Ffordd y Môr']],
     ['ffordd herring', []],
     ['12', ['12 Copper Lane', '12 Herring Row', 'Flat 3, 9 St Mary’s Gardens']],
-    ['', ['112 Herring Row', '12 Copper Lane', '12 Herring Row', '4 Ffordd y Môr', '5 Under_score Way', 'Flat 3, 9 St Mary’s Gardens']],
+    [
+      '',
+      [
+        '112 Herring Row',
+        '12 Copper Lane',
+        '12 Herring Row',
+        '4 Ffordd y Môr',
+        '5 Under_score Way',
+        'Flat 3, 9 St Mary’s Gardens',
+      ],
+    ],
   ])('for “%s” finds %j', async (search, found) => {
     expect(await addresses(search)).toEqual(found)
   })
@@ -95,11 +116,17 @@ describe('search', () => {
 describe('the search box', () => {
   it('puts whole words first, then goes by address', async () => {
     const { homes: found } = await findHomes(organisation.manager, { q: '12' }, TODAY)
-    expect(found.map((one) => one.address)).toEqual(['12 Copper Lane', '12 Herring Row', 'Flat 3, 9 St Mary’s Gardens'])
+    expect(found.map((one) => one.address)).toEqual([
+      '12 Copper Lane',
+      '12 Herring Row',
+      'Flat 3, 9 St Mary’s Gardens',
+    ])
   })
 
   it('finds nothing for nothing, and asks the database nothing', async () => {
-    const { result, statements } = await countingStatements(() => findHomes(organisation.manager, { q: ' - ' }, TODAY))
+    const { result, statements } = await countingStatements(() =>
+      findHomes(organisation.manager, { q: ' - ' }, TODAY),
+    )
     expect(result).toEqual({ homes: [] })
     expect(statements).toEqual([])
   })
@@ -108,9 +135,15 @@ describe('the search box', () => {
     const made = Array.from({ length: 12 }, (_, at) => home({ address: `${at + 1} Plenty Place` }))
     await inTransaction(organisation, async (scope) => {
       await homes.insertMany(scope, made)
-      await refreshHomes(scope, made.map((one) => one.id), TODAY)
+      await refreshHomes(
+        scope,
+        made.map((one) => one.id),
+        TODAY,
+      )
     })
-    const { result, statements } = await countingStatements(() => findHomes(organisation.manager, { q: 'plenty' }, TODAY))
+    const { result, statements } = await countingStatements(() =>
+      findHomes(organisation.manager, { q: 'plenty' }, TODAY),
+    )
     expect(result.homes.map((one) => Number.parseInt(one.address))).toEqual([1, 2, 3, 4, 5, 6, 7, 8])
     expect(statements.length).toBe(2)
   })

@@ -20,12 +20,17 @@ export async function someHomes(n: number, seed = 1): Promise<AnOrganisation> {
   await loadHomes(organisation, n, { seed, today: TODAY })
   await rescoreOrganisation(organisation, TODAY)
   const { organisationId: organisation_id } = organisation
-  await pool()('home_register').where({ organisation_id }).update({ score: pool().raw('round(score / 200) * 200') })
+  await pool()('home_register')
+    .where({ organisation_id })
+    .update({ score: pool().raw('round(score / 200) * 200') })
   const ids = (await pool()('homes').where({ organisation_id }).orderBy('uprn').pluck('id')) as string[]
   for (const [at, patch] of [organisation.patches.north, organisation.patches.south].entries()) {
     const some = ids.filter((_, i) => i % 5 === at)
     await pool()('homes').where({ organisation_id }).whereIn('id', some).update({ patch_id: patch })
-    await pool()('home_register').where({ organisation_id }).whereIn('home_id', some).update({ patch_id: patch })
+    await pool()('home_register')
+      .where({ organisation_id })
+      .whereIn('home_id', some)
+      .update({ patch_id: patch })
   }
   return organisation
 }
@@ -35,6 +40,10 @@ export async function everyHome({ manager }: AnOrganisation): Promise<HomeRow[]>
   const scope = reading(manager)
   const filter = filterFor(manager, homeQueryOf({}), TODAY, NOTICE_DAYS)
   const places = await homeList.listPlaces(scope, filter, { sort: 'score', order: 'desc' }, null, 100_000)
-  const homes = await homeList.listByIds(scope, 'all', places.map((place) => place.id))
+  const homes = await homeList.listByIds(
+    scope,
+    'all',
+    places.map((place) => place.id),
+  )
   return homes.map(standingOn(TODAY, NOTICE_DAYS))
 }
