@@ -4,10 +4,15 @@ import { parseArgs } from 'node:util'
 import { calendarDay } from '@/lib/calendar/calendar-day'
 import { isRefusal } from '@/lib/errors/expected'
 import { today } from '@/lib/platform/clock'
-import { type FileImport, type FileImportResult, importFromFile } from '@/lib/use-cases/imports/import-from-file'
+import {
+  type FileImport,
+  type FileImportResult,
+  importFromFile,
+} from '@/lib/use-cases/imports/import-from-file'
 import { stopDatabase } from '@/lib/use-cases/jobs/stop-database'
 
-const USAGE = 'Usage: npm run import -- FILE --organisation SLUG [--mapping FILE] [--today YYYY-MM-DD] [--dry-run] [--json]'
+const USAGE =
+  'Usage: npm run import -- FILE --organisation SLUG [--mapping FILE] [--today YYYY-MM-DD] [--dry-run] [--json]'
 
 class Wrong extends Error {}
 
@@ -47,7 +52,9 @@ const asJson = ({ layout, report, importId }: FileImportResult, dryRun: boolean)
   dry_run: dryRun,
   import_id: importId,
   file_kind: layout.fileKind,
-  mapping: Object.fromEntries(Object.entries(layout.mapping).map(([field, column]) => [field, layout.headings[column] ?? null])),
+  mapping: Object.fromEntries(
+    Object.entries(layout.mapping).map(([field, column]) => [field, layout.headings[column] ?? null]),
+  ),
   homes: report.homes,
   clashes: report.clashes,
   kept: report.kept,
@@ -73,10 +80,14 @@ function inWords({ layout, report }: FileImportResult, dryRun: boolean): string 
 try {
   const { json, ...file } = await readArguments()
   const result = await importFromFile(file)
-  process.stdout.write(`${json ? JSON.stringify(asJson(result, file.dryRun), null, 1) : inWords(result, file.dryRun)}\n`)
+  process.stdout.write(
+    `${json ? JSON.stringify(asJson(result, file.dryRun), null, 1) : inWords(result, file.dryRun)}\n`,
+  )
 } catch (thrown) {
   const known = isRefusal(thrown) || thrown instanceof Wrong || thrown instanceof RangeError
-  const told = known || (thrown instanceof TypeError && 'code' in thrown && String(thrown.code).startsWith('ERR_PARSE_ARGS'))
+  const told =
+    known ||
+    (thrown instanceof TypeError && 'code' in thrown && String(thrown.code).startsWith('ERR_PARSE_ARGS'))
   console.error(told ? (thrown as Error).message : thrown)
   process.exitCode = 1
 } finally {

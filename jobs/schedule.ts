@@ -10,7 +10,10 @@ export function startSchedule(): () => void {
     '15 3 * * *',
     () =>
       queueNightlyRescore(today()).catch((thrown: unknown) =>
-        log().error({ error: thrown instanceof Error ? thrown.message : String(thrown) }, 'nightly re-score not queued'),
+        log().error(
+          { error: thrown instanceof Error ? thrown.message : String(thrown) },
+          'nightly re-score not queued',
+        ),
       ),
     { timezone: 'Europe/London', noOverlap: true, name: 'nightly-rescore' },
   )

@@ -20,7 +20,10 @@ async function keepDoing(what: string, next: () => Promise<boolean>): Promise<vo
     try {
       if (await next()) continue
     } catch (thrown) {
-      log().error({ what, error: thrown instanceof Error ? thrown.message : String(thrown) }, 'worker could not go on')
+      log().error(
+        { what, error: thrown instanceof Error ? thrown.message : String(thrown) },
+        'worker could not go on',
+      )
     }
     await pause()
   }

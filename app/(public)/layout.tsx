@@ -3,6 +3,7 @@ import { type ReactNode } from 'react'
 import { BrandMark } from '@/components/shell/brand-mark'
 import { Footer } from '@/components/shell/footer'
 import { SkipLink } from '@/components/shell/skip-link'
+import { StreetEdge } from '@/components/shell/street-edge'
 import { ButtonLink } from '@/components/ui/button-link'
 import { optionalActor } from '../session'
 
@@ -31,7 +32,8 @@ export default async function PublicLayout({ children }: { children: ReactNode }
       <main id="main" tabIndex={-1} className="page-width flex-1 outline-none">
         {children}
       </main>
-      <Footer />
+      <StreetEdge />
+      <Footer flush />
     </div>
   )
 }

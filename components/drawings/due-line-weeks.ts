@@ -35,7 +35,7 @@ export function stretchHref(weeks: readonly DueLineWeek[], { from, to }: Stretch
   const first = weeks[from]
   const last = weeks[to]
   return first && last
-    ? `/homes?dueFrom=${first.monday}&dueTo=${addDays(last.monday, 6)}&sort=due&order=asc`
+    ? `/homes?dueFrom=${first.monday}&dueTo=${addDays(last.monday, 6)}&duty=owed&sort=due&order=asc`
     : '/homes'
 }
 

@@ -187,6 +187,7 @@ export function DueLine({ weeks, today, title = 'Reports lapsing, week by week' 
               className={classNames(
                 'absolute top-1.5 border-line whitespace-nowrap',
                 index % 3 !== 0 && 'max-sm:hidden',
+                index % 2 !== 0 && 'sm:max-lg:hidden',
               )}
               style={{ left: percent(at) }}
             >

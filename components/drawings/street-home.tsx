@@ -103,8 +103,8 @@ export function StreetHome({ year, runsOn, className }: Props) {
       <path d="M0 202H240" className="stroke-copper" strokeWidth="3" />
       {runsOn && (
         <g className="max-lg:hidden">
-          <path d="M-900 180H2400" className="stroke-ink" strokeWidth="2.4" />
-          <path d="M-900 202H2400" className="stroke-copper" strokeWidth="3" />
+          <path d="M-6000 180H6000" className="stroke-ink" strokeWidth="2.4" />
+          <path d="M-6000 202H6000" className="stroke-copper" strokeWidth="3" />
         </g>
       )}
       {DRAWINGS[year]}

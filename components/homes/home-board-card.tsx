@@ -4,11 +4,18 @@ import { ShareBar } from '@/components/drawings/share-bar'
 import { ButtonLink } from '@/components/ui/button-link'
 import { Card } from '@/components/ui/card'
 import { boardInWords } from '@/lib/electrical/board-in-words'
-import { FACT_NAMES, type FactKind } from '@/lib/homes/fact'
+import { FACT_NAMES, type FactKind, type FactSource } from '@/lib/homes/fact'
 import { type HomeRow } from '@/lib/homes/home-row'
 import { dateWithPrecision } from './home-provenance'
 import { type FactHistoryShown, type NeighboursShown } from './home-shown'
-import { countOf, SOURCE_NAMES, whole } from './home-words'
+import { countOf, whole } from './home-words'
+
+const FROM: Record<FactSource, string> = {
+  inspection: 'an inspection',
+  import: 'an imported list',
+  officer: 'an officer',
+  inferred: 'what is likely for it',
+}
 
 const SHOWN: readonly FactKind[] = ['board-type', 'ways', 'rcd-cover']
 
@@ -18,14 +25,20 @@ function provenance(facts: readonly FactHistoryShown[]): readonly string[] {
   for (const kind of SHOWN) {
     const fact = facts.find((one) => one.kind === kind)?.current
     if (!fact || fact.value === null) continue
-    const from = `${SOURCE_NAMES[fact.source].toLowerCase()}, ${dateWithPrecision(fact.asOf)}`
+    const from = `${FROM[fact.source]}, ${dateWithPrecision(fact.asOf)}`
     told.set(from, [...(told.get(from) ?? []), FACT_NAMES[kind]])
   }
   if (told.size === 1) return [`From ${[...told.keys()].join('')}.`]
   return [...told].map(([from, kinds]) => `${kinds.join(' and ')}: ${from}.`)
 }
 
-function Neighbours({ block, neighbours }: { block: { id: string; name: string }; neighbours: NeighboursShown }) {
+function Neighbours({
+  block,
+  neighbours,
+}: {
+  block: { id: string; name: string }
+  neighbours: NeighboursShown
+}) {
   const { homes, withRewireableWays, unknown, lapsed } = neighbours
   if (homes === 0) return null
   return (
@@ -41,7 +54,8 @@ function Neighbours({ block, neighbours }: { block: { id: string; name: string }
       </div>
       <p className="mt-1.5 text-sm text-slate">
         {whole(withRewireableWays)} with rewireable fuses, {whole(unknown)} whose board is not known,{' '}
-        {whole(homes - withRewireableWays - unknown)} with others; {whole(lapsed)} lapsed. A block was often wired at one time.
+        {whole(homes - withRewireableWays - unknown)} with others; {whole(lapsed)} lapsed. A block was often
+        wired at one time.
       </p>
     </div>
   )
@@ -62,7 +76,13 @@ export function HomeBoardCard({ home, facts, neighbours, mayEdit, className }: P
   return (
     <Card id="board" title="Consumer unit" sub={`${words}.`} className={className}>
       <div className="py-1 print:max-w-56">
-        <BoardStrip ways={home.ways} boardType={home.boardType} rcdCover={home.rcdCover} size="full" decorative />
+        <BoardStrip
+          ways={home.ways}
+          boardType={home.boardType}
+          rcdCover={home.rcdCover}
+          size="full"
+          decorative
+        />
       </div>
       {from.length > 0 ? (
         from.map((sentence) => (
@@ -73,11 +93,16 @@ export function HomeBoardCard({ home, facts, neighbours, mayEdit, className }: P
       ) : (
         <div className="mt-3">
           <p className="text-blueprint">
-            Nobody has told the register what is on the wall. The last report says it; so does a look behind the flap, without
-            removing any cover.
+            Nobody has told the register what is on the wall. The last report says it; so does a look behind
+            the flap, without removing any cover.
           </p>
           {mayEdit && (
-            <ButtonLink href={`/homes/${home.id}/facts#board`} kind="secondary" size="compact" className="mt-3">
+            <ButtonLink
+              href={`/homes/${home.id}/facts#board`}
+              kind="secondary"
+              size="compact"
+              className="mt-3"
+            >
               Say what is there
             </ButtonLink>
           )}

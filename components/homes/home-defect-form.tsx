@@ -18,7 +18,10 @@ export function HomeDefectForm({ homeId, action }: { homeId: string; action: For
         name="code"
         legend="Code"
         hint="As the inspector gave it."
-        choices={CLASSIFICATION_CODES.map((code) => ({ value: code, label: `${code}: ${CODE_MEANINGS[code]}` }))}
+        choices={CLASSIFICATION_CODES.map((code) => ({
+          value: code,
+          label: `${code}: ${CODE_MEANINGS[code]}`,
+        }))}
       />
       <TextAreaField
         name="description"
@@ -27,7 +30,13 @@ export function HomeDefectForm({ homeId, action }: { homeId: string; action: For
         maxLength={500}
         className="max-w-reading"
       />
-      <TextField name="location" label="Where in the home" hint="Circuit, room or device." maxLength={160} optional />
+      <TextField
+        name="location"
+        label="Where in the home"
+        hint="Circuit, room or device."
+        maxLength={160}
+        optional
+      />
       <DateField name="raisedOn" legend="Found on" hint="All empty means today." optional />
       <div className="flex flex-wrap gap-3">
         <SubmitButton pendingText="Saving…">Add the defect</SubmitButton>

@@ -21,7 +21,15 @@ export function ageInWords({ raisedOn }: Pick<DefectShown, 'raisedOn'>, today: C
   return days === 0 ? 'open since today' : `open for ${countOf(days, 'day')}`
 }
 
-function OpenDefect({ defect, today, children }: { defect: DefectShown; today: CalendarDay; children?: ReactNode }) {
+function OpenDefect({
+  defect,
+  today,
+  children,
+}: {
+  defect: DefectShown
+  today: CalendarDay
+  children?: ReactNode
+}) {
   const pressing = defect.code === 'C1' || defect.code === 'C2'
   return (
     <li className="py-4 first:pt-0 last:pb-0 print:py-1.5">
@@ -91,15 +99,24 @@ export function HomeDefectsCard({ homeId, open, closed, mayEdit, today, closeDef
     >
       {open.length > 0 ? (
         <ul className="divide-y divide-line">
-          {open.map((defect) => (
+          {open.map((defect, at) => (
             <OpenDefect key={defect.id} defect={defect} today={today}>
-              {mayEdit && <CloseDefectForm homeId={homeId} defectId={defect.id} today={today} action={closeDefect} />}
+              {mayEdit && (
+                <CloseDefectForm
+                  homeId={homeId}
+                  defectId={defect.id}
+                  name={`${at + 1} of ${open.length}, ${defect.code}: ${defect.description}`}
+                  today={today}
+                  action={closeDefect}
+                />
+              )}
             </OpenDefect>
           ))}
         </ul>
       ) : (
         <p className="text-slate">
-          Nothing is on record as still to be put right. Observations of a report and what an officer sees go here.
+          Nothing is on record as still to be put right. Observations of a report and what an officer sees go
+          here.
         </p>
       )}
       {closed.length > 0 && (
@@ -112,8 +129,8 @@ export function HomeDefectsCard({ homeId, open, closed, mayEdit, today, closeDef
         </Disclosure>
       )}
       <p className="mt-4 border-t border-line pt-3 text-sm text-slate print:mt-2 print:pt-1.5">
-        A code is the inspector’s own. Fuseward gives none, and changes none: whoever is licensed to do the work decides,
-        by the rules that hold where the home is.
+        A code is the inspector’s own. Fuseward gives none, and changes none: whoever is licensed to do the
+        work decides, by the rules that hold where the home is.
       </p>
     </Card>
   )

@@ -9,7 +9,15 @@ import { factValueInWords } from '@/lib/homes/fact-value'
 import { FACT_CHOICES } from './home-fact-choices'
 import { dateWithPrecision } from './home-provenance'
 import { type FactHistoryShown } from './home-shown'
-import { CHOSEN_KINDS, type ChosenKind, fieldValue, isTouched, seenField, type TypedKind, wasField } from './home-touched-facts'
+import {
+  CHOSEN_KINDS,
+  type ChosenKind,
+  fieldValue,
+  isTouched,
+  seenField,
+  type TypedKind,
+  wasField,
+} from './home-touched-facts'
 import { WaysField } from './home-ways-field'
 import { momentInWords, SOURCE_NAMES } from './home-words'
 
@@ -38,7 +46,11 @@ function ChangedMeanwhile({ fact: { kind, current } }: { fact: FactHistoryShown 
   const typed = form?.values?.[kind]
   const mine = typeof typed === 'string' && typed !== now ? typed : null
   return (
-    <Notice tone="amber" title={`${FACT_NAMES[kind]} has changed since you opened this page`} className="mb-2">
+    <Notice
+      tone="amber"
+      title={`${FACT_NAMES[kind]} has changed since you opened this page`}
+      className="mb-2"
+    >
       It was {inWords(kind, was)}. {current?.recordedBy ?? 'Somebody else'} put {inWords(kind, now)} on record
       {current && ` ${momentInWords(current.recordedAt)}`}.{' '}
       {mine === null

@@ -11,12 +11,13 @@ import { type FactKind } from '@/lib/homes/fact'
 import { FactField, withFreshFacts } from './home-fact-field'
 import { type FactHistoryShown } from './home-shown'
 
-const PARTS: readonly { readonly id: string; readonly title: string; readonly kinds: readonly FactKind[] }[] = [
-  { id: 'board', title: 'Consumer unit', kinds: ['ways', 'board-type', 'rcd-cover'] },
-  { id: 'wiring', title: 'Wiring', kinds: ['wiring', 'rewired'] },
-  { id: 'dwelling', title: 'The dwelling', kinds: ['dwelling-type', 'built', 'bedrooms'] },
-  { id: 'inspected', title: 'Inspection', kinds: ['inspection-record'] },
-]
+const PARTS: readonly { readonly id: string; readonly title: string; readonly kinds: readonly FactKind[] }[] =
+  [
+    { id: 'board', title: 'What is on the wall', kinds: ['ways', 'board-type', 'rcd-cover'] },
+    { id: 'wiring', title: 'The wiring', kinds: ['wiring', 'rewired'] },
+    { id: 'dwelling', title: 'The dwelling', kinds: ['dwelling-type', 'built', 'bedrooms'] },
+    { id: 'inspected', title: 'If no report is on record', kinds: ['inspection-record'] },
+  ]
 
 /** Shows the fields what was typed, but for facts that nobody touched: these follow the register. */
 function FreshFacts({ facts, children }: { facts: readonly FactHistoryShown[]; children: ReactNode }) {
@@ -34,7 +35,12 @@ export function HomeFactsForm({ homeId, facts, action }: Props) {
       <input type="hidden" name="homeId" value={homeId} />
       <FreshFacts facts={facts}>
         {PARTS.map(({ id, title, kinds }) => (
-          <section key={id} id={id} aria-labelledby={`${id}-title`} className="mb-8 border-t border-line pt-5">
+          <section
+            key={id}
+            id={id}
+            aria-labelledby={`${id}-title`}
+            className="mb-8 border-t border-line pt-5"
+          >
             <h2 id={`${id}-title`} className="mb-4 text-xl">
               {title}
             </h2>

@@ -36,7 +36,8 @@ function Earlier({ before }: { before: readonly FactShown[] }) {
   )
 }
 
-const ROW = 'grid gap-x-6 gap-y-1 px-4 py-3 sm:grid-cols-[8rem_minmax(0,1fr)_minmax(0,1fr)] print:grid-cols-[7rem_minmax(0,2fr)_minmax(0,4fr)] print:px-3 print:py-0.5'
+const ROW =
+  'grid gap-x-6 gap-y-1 px-4 py-3 sm:grid-cols-[8rem_minmax(0,1fr)_minmax(0,1fr)] print:grid-cols-[7rem_minmax(0,2fr)_minmax(0,4fr)] print:px-3 print:py-0.5'
 
 type Props = {
   homeId: string
@@ -48,7 +49,9 @@ type Props = {
 
 /** What the register knows of the home, where each value is from, and what it was before. */
 export function HomeFactsSection({ homeId, facts, hasInspections, mayEdit }: Props) {
-  const shown = facts.filter(({ kind, current }) => kind !== 'inspection-record' || (current !== null && !hasInspections))
+  const shown = facts.filter(
+    ({ kind, current }) => kind !== 'inspection-record' || (current !== null && !hasInspections),
+  )
   const known = shown.filter(({ current }) => current !== null && current.value !== null).length
   return (
     <HomeSection
@@ -72,7 +75,11 @@ export function HomeFactsSection({ homeId, facts, hasInspections, mayEdit }: Pro
               <Earlier before={before} />
             </dd>
             <dd className="min-w-0">
-              {current ? <HomeProvenance {...current} /> : <span className="text-slate">Nothing on record</span>}
+              {current ? (
+                <HomeProvenance {...current} />
+              ) : (
+                <span className="text-slate">Nothing on record</span>
+              )}
             </dd>
           </div>
         ))}

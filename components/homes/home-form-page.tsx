@@ -27,7 +27,10 @@ export function HomeFormPage({ home, title, sub, aside, children }: Props) {
           </>
         }
         above={
-          <Breadcrumb steps={[...stepsTo(home), { href: `/homes/${home.id}`, label: home.address }]} here={title} />
+          <Breadcrumb
+            steps={[...stepsTo(home), { href: `/homes/${home.id}`, label: home.address }]}
+            here={title}
+          />
         }
       />
       <div className="grid gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">

@@ -18,7 +18,15 @@ export function AddressFields({ home }: { home?: Pick<HomeRow, 'address' | 'town
         maxLength={200}
         autoComplete="off"
       />
-      <TextField name="town" label="Town" defaultValue={home?.town ?? ''} maxLength={120} width="medium" autoComplete="off" optional />
+      <TextField
+        name="town"
+        label="Town"
+        defaultValue={home?.town ?? ''}
+        maxLength={120}
+        width="medium"
+        autoComplete="off"
+        optional
+      />
       <TextField
         name="postcode"
         label="Postcode"

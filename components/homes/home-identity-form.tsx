@@ -24,7 +24,11 @@ export function HomeIdentityForm({ home, note, patches, action }: Props) {
         defaultValue={home.kind}
         choices={[
           { value: 'dwelling', label: 'A dwelling' },
-          { value: 'communal', label: 'A landlord’s supply', hint: 'Stairs, lifts and outside lights of a block.' },
+          {
+            value: 'communal',
+            label: 'A landlord’s supply',
+            hint: 'Stairs, lifts and outside lights of a block.',
+          },
         ]}
       />
       <h2 className={heading}>Duty</h2>

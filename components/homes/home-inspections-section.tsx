@@ -18,8 +18,12 @@ function Report({ inspection }: { inspection: InspectionShown }) {
   return (
     <li className="grid gap-x-6 gap-y-1.5 px-4 py-3 sm:grid-cols-[minmax(0,2fr)_minmax(0,2fr)_minmax(0,4fr)] print:grid-cols-[minmax(0,1fr)_minmax(0,2fr)_minmax(0,2fr)] print:px-3 print:py-1">
       <div>
-        <p className={withdrawnAt ? 'font-semibold line-through' : 'font-semibold'}>{dateWithPrecision(inspectedOn)}</p>
-        {withdrawnAt && <p className="text-sm text-slate">Withdrawn {momentInWords(withdrawnAt)}: it does not count</p>}
+        <p className={withdrawnAt ? 'font-semibold line-through' : 'font-semibold'}>
+          {dateWithPrecision(inspectedOn)}
+        </p>
+        {withdrawnAt && (
+          <p className="text-sm text-slate">Withdrawn {momentInWords(withdrawnAt)}: it does not count</p>
+        )}
       </div>
       <div>
         <Outcome assessment={inspection.assessment} />
@@ -34,7 +38,12 @@ function Report({ inspection }: { inspection: InspectionShown }) {
   )
 }
 
-type Props = { homeId: string; inspections: readonly InspectionShown[]; neverInspected: boolean; mayEdit: boolean }
+type Props = {
+  homeId: string
+  inspections: readonly InspectionShown[]
+  neverInspected: boolean
+  mayEdit: boolean
+}
 
 /** The inspections on record, the newest first. */
 export function HomeInspectionsSection({ homeId, inspections, neverInspected, mayEdit }: Props) {

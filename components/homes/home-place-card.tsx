@@ -32,14 +32,15 @@ export function HomePlaceCard({ place }: { place: HomeRow['place'] }) {
             <span className="figures">{place.longitude.toFixed(5)}</span>
           </p>
           <p className="no-print mt-2">
-            <Link href={mapAround(place)} className="link link-block">
+            <Link href={mapAround(place)} className="link-block link">
               On the map, with the homes around it
             </Link>
           </p>
         </>
       ) : (
         <p className="text-slate">
-          Not on the map. An import with its easting and northing, or with latitude and longitude, puts it there.
+          Not on the map. An import with its easting and northing, or with latitude and longitude, puts it
+          there.
         </p>
       )}
     </Card>

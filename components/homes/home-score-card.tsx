@@ -31,7 +31,10 @@ function rangeInWords({ low, high, unknowns }: Assessment): string {
 function OtherHazard({ hazard }: { hazard: HazardAssessment }) {
   const name = HAZARD_NAMES[hazard.hazard]
   return (
-    <Disclosure summary={`${name}: ${scoreInWords(hazard.score)}, lower, so it does not rank`} className="mt-4 print:hidden">
+    <Disclosure
+      summary={`${name}: ${scoreInWords(hazard.score)}, lower, so it does not rank`}
+      className="mt-4 print:hidden"
+    >
       <HomeShiftTable hazard={hazard} caption={`What bears on the likelihood: ${name}`} />
       <SpreadOfHarm hazard={hazard} />
     </Disclosure>
@@ -47,15 +50,18 @@ type Props = {
 
 /** The score with everything that it is made of, and the fact that would say most. */
 export function HomeScoreCard({ home, assessment, rank, className }: Props) {
-  const title = rank.of > 1 ? `Why it ranks ${ordinal(rank.place)} of ${rank.of.toLocaleString('en-GB')}` : 'Why it scores this'
+  const title =
+    rank.of > 1
+      ? `Why it ranks ${ordinal(rank.place)} of ${rank.of.toLocaleString('en-GB')}`
+      : 'Why it scores this'
   const hazards = [...(assessment?.hazards ?? [])].sort((a, b) => b.score - a.score)
   const [ranking, ...others] = hazards
   if (!assessment || !ranking) {
     return (
       <Card id="score" title="Score" className={className}>
         <p className="text-slate">
-          No explanation of this home’s score is on record yet. It is scored again tonight, and with each change of its
-          facts.
+          No explanation of this home’s score is on record yet. It is scored again tonight, and with each
+          change of its facts.
         </p>
       </Card>
     )
@@ -70,12 +76,18 @@ export function HomeScoreCard({ home, assessment, rank, className }: Props) {
           {scoreInWords(assessment.score)}
         </p>
         <div className="min-w-0 flex-1 basis-64 print:basis-40">
-          <RangeBar score={assessment.score} low={assessment.low} high={assessment.high} nation={home.nation} size="card" />
+          <RangeBar
+            score={assessment.score}
+            low={assessment.low}
+            high={assessment.high}
+            nation={home.nation}
+            size="card"
+          />
         </div>
       </div>
       <p className="mt-2 text-sm text-slate">
-        {rangeInWords(assessment)} {bandInWords(assessment.score, home)} Method {assessment.methodVersion}, as of{' '}
-        {dayInWords(assessment.assessedOn)}.
+        {rangeInWords(assessment)} {bandInWords(assessment.score, home)} Method {assessment.methodVersion}, as
+        of {dayInWords(assessment.assessedOn)}.
       </p>
       <h3 className="mt-5 mb-1 text-base print:mt-2">{name}</h3>
       <HomeShiftTable hazard={ranking} caption={`What bears on the likelihood: ${name}`} />
@@ -83,8 +95,8 @@ export function HomeScoreCard({ home, assessment, rank, className }: Props) {
       {next && (
         <div className="mt-4 rounded-plate bg-copper-wash px-4 py-3 print:mt-2 print:py-1.5">
           <p>
-            <strong>Find out next:</strong> {next.what}. It would narrow the range more than anything else that is not
-            known.
+            <strong>Find out next:</strong> {next.what}. It would narrow the range more than anything else
+            that is not known.
           </p>
           <p className="mt-1 text-sm">{next.how}</p>
         </div>

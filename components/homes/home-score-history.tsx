@@ -10,7 +10,18 @@ import { countOf } from './home-words'
 
 const SHOWN_AT_FIRST = 6
 
-function Scores({ scores, nation, caption }: { scores: readonly ScoreShown[]; nation: Nation; caption: string }) {
+const rangeInWords = (low: number, high: number) =>
+  scoreInWords(low) === scoreInWords(high) ? 'none' : `${scoreInWords(low)} to ${scoreInWords(high)}`
+
+function Scores({
+  scores,
+  nation,
+  caption,
+}: {
+  scores: readonly ScoreShown[]
+  nation: Nation
+  caption: string
+}) {
   return (
     <Table caption={caption}>
       <thead>
@@ -25,12 +36,14 @@ function Scores({ scores, nation, caption }: { scores: readonly ScoreShown[]; na
       <tbody>
         {scores.map(({ on, score, low, high, methodVersion }, at) => (
           <Row key={`${on} ${at}`}>
-            <RowHead className="whitespace-nowrap">{partialDateInWords({ day: on, precision: 'day' }, 'short')}</RowHead>
+            <RowHead className="whitespace-nowrap">
+              {partialDateInWords({ day: on, precision: 'day' }, 'short')}
+            </RowHead>
             <Cell numeric className="figures">
               {scoreInWords(score)}
             </Cell>
             <Cell numeric className="whitespace-nowrap text-slate">
-              {scoreInWords(low)} to {scoreInWords(high)}
+              {rangeInWords(low, high)}
             </Cell>
             <Cell className="hidden sm:table-cell">
               <RangeBar score={score} low={low} high={high} nation={nation} decorative />
@@ -52,7 +65,11 @@ export function HomeScoreHistory({ history, nation }: { history: readonly ScoreS
       {newest.length === 0 ? (
         <p className="text-slate">No score is on record yet. Each one is kept from the first on.</p>
       ) : (
-        <Scores scores={newest.slice(0, SHOWN_AT_FIRST)} nation={nation} caption="Scores of this home, newest first" />
+        <Scores
+          scores={newest.slice(0, SHOWN_AT_FIRST)}
+          nation={nation}
+          caption="Scores of this home, newest first"
+        />
       )}
       {older.length > 0 && (
         <Disclosure summary={`${countOf(older.length, 'older score')}`} className="mt-3 print:hidden">

@@ -23,7 +23,8 @@ type Props = {
 
 /** One home: who and where, what is on the wall, why it ranks where it does, how it stands, and its record. */
 export function HomeScreen({ shown, today, said, closeDefect }: Props) {
-  const { home, note, standing, facts, inspections, openDefects, closedDefects, assessment, rank, mayEdit } = shown
+  const { home, note, standing, facts, inspections, openDefects, closedDefects, assessment, rank, mayEdit } =
+    shown
   return (
     <div className="print:[zoom:0.72]">
       <HomeHeader home={home} isOwed={standing.isOwed} mayEdit={mayEdit} today={today} />
@@ -33,8 +34,19 @@ export function HomeScreen({ shown, today, said, closeDefect }: Props) {
         </div>
       )}
       <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,5fr)_minmax(0,4fr)] lg:grid-rows-[auto_auto_1fr] lg:gap-5 print:grid-cols-[minmax(0,5fr)_minmax(0,4fr)] print:grid-rows-[auto_auto_1fr] print:gap-2">
-        <HomeBoardCard home={home} facts={facts} neighbours={shown.neighbours} mayEdit={mayEdit} className="print:p-3" />
-        <HomeScoreCard home={home} assessment={assessment} rank={rank} className="lg:col-start-2 lg:row-span-3 lg:row-start-1 print:col-start-2 print:row-span-3 print:row-start-1 print:p-3" />
+        <HomeBoardCard
+          home={home}
+          facts={facts}
+          neighbours={shown.neighbours}
+          mayEdit={mayEdit}
+          className="print:p-3"
+        />
+        <HomeScoreCard
+          home={home}
+          assessment={assessment}
+          rank={rank}
+          className="lg:col-start-2 lg:row-span-3 lg:row-start-1 print:col-start-2 print:row-span-3 print:row-start-1 print:p-3"
+        />
         <HomeStandingCard home={home} standing={standing} today={today} className="print:p-3" />
         <HomeDefectsCard
           homeId={home.id}
@@ -47,7 +59,12 @@ export function HomeScreen({ shown, today, said, closeDefect }: Props) {
         />
       </div>
       <div className="mt-10 space-y-10 print:mt-3 print:space-y-3">
-        <HomeFactsSection homeId={home.id} facts={facts} hasInspections={inspections.length > 0} mayEdit={mayEdit} />
+        <HomeFactsSection
+          homeId={home.id}
+          facts={facts}
+          hasInspections={inspections.length > 0}
+          mayEdit={mayEdit}
+        />
         <HomeInspectionsSection
           homeId={home.id}
           inspections={inspections}
@@ -61,7 +78,9 @@ export function HomeScreen({ shown, today, said, closeDefect }: Props) {
               {note ? (
                 <p className="max-w-reading whitespace-pre-line">{note}</p>
               ) : (
-                <p className="text-slate">No note. One can come with an import, or with “Change address and tenure”.</p>
+                <p className="text-slate">
+                  No note. One can come with an import, or with “Change address and tenure”.
+                </p>
               )}
             </Card>
             <HomePlaceCard place={home.place} />

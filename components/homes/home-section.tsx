@@ -14,7 +14,7 @@ type Props = {
 export function HomeSection({ id, title, sub, actions, children, className }: Props) {
   return (
     <section id={id} aria-labelledby={`${id}-title`} className={classNames('min-w-0', className)}>
-      <div className="mb-3 print:mb-1 flex flex-wrap items-end justify-between gap-x-4 gap-y-2">
+      <div className="mb-3 flex flex-wrap items-end justify-between gap-x-4 gap-y-2 print:mb-1">
         <div className="min-w-0">
           <h2 id={`${id}-title`} className="text-xl">
             {title}

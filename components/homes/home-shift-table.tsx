@@ -26,19 +26,25 @@ function TrackPiece({ piece, track }: { piece: PlacedShift; track: ShiftTrack })
         ? 'fill-verdigris'
         : 'fill-copper'
   return (
-    <svg viewBox={`0 0 ${WIDTH} ${HEIGHT}`} width={WIDTH} height={HEIGHT} aria-hidden="true" className="block">
+    <svg
+      viewBox={`0 0 ${WIDTH} ${HEIGHT}`}
+      width={WIDTH}
+      height={HEIGHT}
+      aria-hidden="true"
+      className="block"
+    >
       <path d={`M${at(0)} 0v${HEIGHT}`} className="stroke-edge" strokeWidth="1" />
       {Math.abs(steps) >= SMALLEST_DRAWN && (
-      <rect
-        data-solid
-        x={isOutlined ? left + 0.75 : left}
-        y="1.5"
-        width={isOutlined ? width - 1.5 : width}
-        height={HEIGHT - 3}
-        className={look}
-        strokeWidth={isOutlined ? 1.5 : undefined}
-        strokeDasharray={isOutlined ? '3 2' : undefined}
-      />
+        <rect
+          data-solid
+          x={isOutlined ? left + 0.75 : left}
+          y="1.5"
+          width={isOutlined ? width - 1.5 : width}
+          height={HEIGHT - 3}
+          className={look}
+          strokeWidth={isOutlined ? 1.5 : undefined}
+          strokeDasharray={isOutlined ? '3 2' : undefined}
+        />
       )}
     </svg>
   )
@@ -48,7 +54,9 @@ const cell = 'py-2 align-baseline print:py-0.5'
 const basisCell = 'hidden py-2 pl-3 text-right align-baseline text-sm text-slate sm:table-cell print:py-0.5'
 
 /** Where there is no room for a column of its own. */
-const BasisBelow = ({ basis }: { basis: Basis }) => <span className="block text-sm text-slate sm:hidden">{basis}</span>
+const BasisBelow = ({ basis }: { basis: Basis }) => (
+  <span className="block text-sm text-slate sm:hidden">{basis}</span>
+)
 
 function ShiftRow({ piece, track }: { piece: PlacedShift; track: ShiftTrack }) {
   const { reason, steps, basis, unknown } = piece.shift
@@ -68,10 +76,10 @@ function ShiftRow({ piece, track }: { piece: PlacedShift; track: ShiftTrack }) {
         )}
         <BasisBelow basis={basis} />
       </th>
-      <td className="hidden py-2 pr-3 pt-3.5 align-top sm:table-cell print:hidden" aria-hidden="true">
+      <td className="hidden py-2 pt-3.5 pr-3 align-top sm:table-cell print:hidden" aria-hidden="true">
         <TrackPiece piece={piece} track={track} />
       </td>
-      <td className={classNames(cell, 'figures text-right whitespace-nowrap', unknown && 'text-blueprint')}>
+      <td className={classNames(cell, 'text-right figures whitespace-nowrap', unknown && 'text-blueprint')}>
         {stepsInWords(steps)}
       </td>
       <td className={basisCell}>{basis}</td>
@@ -110,8 +118,13 @@ export function HomeShiftTable({ hazard, caption }: { hazard: HazardAssessment; 
             <span className="block text-sm text-slate">{base.words}</span>
             <BasisBelow basis={base.basis} />
           </th>
-          <td className="figures py-2 text-right align-baseline whitespace-nowrap sm:hidden print:table-cell print:py-0.5">{likelihoodInWords(base.oneIn)}</td>
-          <td colSpan={2} className="figures hidden py-2 text-right align-baseline whitespace-nowrap sm:table-cell print:hidden">
+          <td className="py-2 text-right align-baseline figures whitespace-nowrap sm:hidden print:table-cell print:py-0.5">
+            {likelihoodInWords(base.oneIn)}
+          </td>
+          <td
+            colSpan={2}
+            className="hidden py-2 text-right align-baseline figures whitespace-nowrap sm:table-cell print:hidden"
+          >
             {likelihoodInWords(base.oneIn)}
           </td>
           <td className={basisCell}>{base.basis}</td>
@@ -123,8 +136,13 @@ export function HomeShiftTable({ hazard, caption }: { hazard: HazardAssessment; 
           <th scope="row" className={classNames(cell, 'pr-3 text-left font-semibold')}>
             Likelihood in the next twelve months
           </th>
-          <td className="figures py-2 text-right align-baseline whitespace-nowrap sm:hidden print:table-cell print:py-0.5">{likelihoodInWords(oneIn)}</td>
-          <td colSpan={2} className="figures hidden py-2 text-right align-baseline whitespace-nowrap sm:table-cell print:hidden">
+          <td className="py-2 text-right align-baseline figures whitespace-nowrap sm:hidden print:table-cell print:py-0.5">
+            {likelihoodInWords(oneIn)}
+          </td>
+          <td
+            colSpan={2}
+            className="hidden py-2 text-right align-baseline figures whitespace-nowrap sm:table-cell print:hidden"
+          >
             {likelihoodInWords(oneIn)}
           </td>
           <td className="hidden sm:table-cell" />

@@ -25,12 +25,17 @@ type Props = { home: HomeRow; standing: StandingShown; today: CalendarDay; class
 export function HomeStandingCard({ home, standing, today, className }: Props) {
   const { reason, rule, citation, decidedBy, isOwed } = standing
   return (
-    <Card id="standing" title="Standing" className={className} actions={<StandingBadge {...home} today={today} />}>
+    <Card
+      id="standing"
+      title="Standing"
+      className={className}
+      actions={<StandingBadge {...home} today={today} />}
+    >
       <p className="max-w-reading">{reason}</p>
       {!isOwed && (
         <p className="mt-3 max-w-reading">
-          The duty does not reach this home: {TENURE_NAMES[home.tenure].toLowerCase()} is outside it. The standing is shown
-          so that it can be followed all the same.
+          The duty does not reach this home: {TENURE_NAMES[home.tenure].toLowerCase()} is outside it. The
+          standing is shown so that it can be followed all the same.
         </p>
       )}
       <Disclosure summary={`The rule: ${citation}`} className="mt-3 print:hidden">
@@ -38,14 +43,23 @@ export function HomeStandingCard({ home, standing, today, className }: Props) {
           items={[
             { term: 'Instrument', value: rule.instrument, note: rule.title },
             { term: 'Clause', value: rule.clause ?? 'none to name' },
-            { term: 'Kind of rule', value: BASES[rule.basis], note: `Taken from ${READ_FROM[rule.confidence]} (${rule.source}).` },
+            {
+              term: 'Kind of rule',
+              value: BASES[rule.basis],
+              note: `Taken from ${READ_FROM[rule.confidence]} (${rule.source}).`,
+            },
             {
               term: 'How it counts',
               value: `${rule.years} years at most, ${rule.dayRule === 'anniversary' ? 'to the anniversary itself' : 'to the day before the anniversary'}`,
               note: `In force from ${dayInWords(rule.inForceFrom)}.`,
             },
             ...(decidedBy
-              ? [{ term: 'This date', value: decidedBy === 'law' ? 'set by the rule' : 'set by the report, which asks for less' }]
+              ? [
+                  {
+                    term: 'This date',
+                    value: decidedBy === 'law' ? 'set by the rule' : 'set by the report, which asks for less',
+                  },
+                ]
               : []),
           ]}
         />

@@ -1,7 +1,13 @@
 import { FACT_KINDS, type FactKind } from '@/lib/homes/fact'
 
 /** Kinds that are chosen from a list, where "not known" is one of the choices; the others are typed, or left empty. */
-export const CHOSEN_KINDS = ['board-type', 'rcd-cover', 'wiring', 'dwelling-type', 'inspection-record'] as const satisfies readonly FactKind[]
+export const CHOSEN_KINDS = [
+  'board-type',
+  'rcd-cover',
+  'wiring',
+  'dwelling-type',
+  'inspection-record',
+] as const satisfies readonly FactKind[]
 export type ChosenKind = (typeof CHOSEN_KINDS)[number]
 export type TypedKind = Exclude<FactKind, ChosenKind>
 
@@ -13,7 +19,8 @@ export const wasField = (kind: FactKind) => `was-${kind}`
 export const seenField = (kind: FactKind) => `seen-${kind}`
 
 /** What a fact's field holds for a value of the register. */
-export const fieldValue = (kind: FactKind, value: string | null): string => value ?? (isChosen(kind) ? 'unknown' : '')
+export const fieldValue = (kind: FactKind, value: string | null): string =>
+  value ?? (isChosen(kind) ? 'unknown' : '')
 
 type Fields = Readonly<Record<string, unknown>>
 
@@ -22,7 +29,9 @@ export const isTouched = (fields: Fields, kind: FactKind): boolean => fields[kin
 
 /** Ways are written in capitals, with or without blanks between them. */
 const tidied = (fields: Fields): Fields =>
-  typeof fields.ways === 'string' ? { ...fields, ways: fields.ways.replace(/\s+/g, '').toUpperCase() } : fields
+  typeof fields.ways === 'string'
+    ? { ...fields, ways: fields.ways.replace(/\s+/g, '').toUpperCase() }
+    : fields
 
 /**
  * A sent form without the facts that nobody touched: what another person changed meanwhile is left alone, and does
@@ -33,6 +42,10 @@ const tidied = (fields: Fields): Fields =>
 export function touchedFacts(given: unknown): unknown {
   if (typeof given !== 'object' || given === null) return given
   const fields = tidied(given as Fields)
-  const untouched = FACT_KINDS.filter((kind) => !isTouched(fields, kind)).flatMap((kind) => [kind, wasField(kind), seenField(kind)])
+  const untouched = FACT_KINDS.filter((kind) => !isTouched(fields, kind)).flatMap((kind) => [
+    kind,
+    wasField(kind),
+    seenField(kind),
+  ])
   return Object.fromEntries(Object.entries(fields).filter(([name]) => !untouched.includes(name)))
 }

@@ -4,7 +4,13 @@ import { type WayDevice } from '@/lib/electrical/consumer-unit'
 /** One device of a board strip, by itself: the key to the drawing. */
 export function WayDeviceDrawing({ device }: { device: WayDevice }) {
   return (
-    <svg viewBox={`0 0 ${CELL_WIDTH} ${CELL_HEIGHT}`} width={20} height={37} aria-hidden="true" className="shrink-0">
+    <svg
+      viewBox={`0 0 ${CELL_WIDTH} ${CELL_HEIGHT}`}
+      width={20}
+      height={37}
+      aria-hidden="true"
+      className="shrink-0"
+    >
       {DEVICE_LAYERS[device].map(({ look, path, bold }, at) => (
         <path
           key={at}

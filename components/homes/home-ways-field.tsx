@@ -28,7 +28,9 @@ function reading(code: string): string {
   const ways = waysOf(code)
   if (!ways) {
     const isOpen = (code.match(/\[/g)?.length ?? 0) > (code.match(/\]/g)?.length ?? 0)
-    return isOpen ? 'Close the RCD with ] after the last way behind it.' : 'Not a board yet: use the letters below.'
+    return isOpen
+      ? 'Close the RCD with ] after the last way behind it.'
+      : 'Not a board yet: use the letters below.'
   }
   const type = boardTypeOfWays(ways)
   const cover = rcdCoverOfWays(ways)
@@ -81,7 +83,7 @@ export function WaysField({ defaultValue, hint, label = 'Ways, from the main swi
         spellCheck={false}
         aria-describedby={state.describedBy}
         aria-invalid={state.problem ? true : undefined}
-        className={controlClass(state.problem, 'figures max-w-md tracking-[0.15em] uppercase')}
+        className={controlClass(state.problem, 'max-w-md figures tracking-[0.15em] uppercase')}
       />
       <div className="mt-3 border border-dashed border-edge bg-surface p-3">
         {ways ? (

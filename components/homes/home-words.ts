@@ -9,7 +9,8 @@ export const whole = (n: number): string => Math.round(n).toLocaleString('en-GB'
  * A number with what it counts.
  * @example countOf(1, 'home') // '1 home'
  */
-export const countOf = (n: number, one: string, more = `${one}s`): string => `${whole(n)} ${n === 1 ? one : more}`
+export const countOf = (n: number, one: string, more = `${one}s`): string =>
+  `${whole(n)} ${n === 1 ? one : more}`
 
 const ENDINGS: Partial<Record<Intl.LDMLPluralRule, string>> = { one: 'st', two: 'nd', few: 'rd' }
 const ORDER = new Intl.PluralRules('en-GB', { type: 'ordinal' })
@@ -45,7 +46,9 @@ const LONDON = new Intl.DateTimeFormat('en-GB', {
  * @example momentInWords(new Date('2026-06-30T23:30:00Z')) // '1 July 2026'
  */
 export function momentInWords(moment: Date): string {
-  const parts = Object.fromEntries(LONDON.formatToParts(moment).map(({ type, value }) => [type, Number(value)]))
+  const parts = Object.fromEntries(
+    LONDON.formatToParts(moment).map(({ type, value }) => [type, Number(value)]),
+  )
   return dayInWords(dayOf(parts.year ?? 0, parts.month ?? 0, parts.day ?? 0))
 }
 

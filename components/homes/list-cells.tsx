@@ -5,7 +5,7 @@ import { RangeBar } from '@/components/drawings/range-bar'
 import { StandingBadge } from '@/components/drawings/standing-badge'
 import { type CalendarDay } from '@/lib/calendar/calendar-day'
 import { partialDateInWords } from '@/lib/calendar/partial-date-in-words'
-import { CLASSIFICATION_CODES } from '@/lib/homes/classification-code'
+import { type ClassificationCode } from '@/lib/homes/classification-code'
 import { DWELLING_TYPE_NAMES } from '@/lib/homes/dwelling-type'
 import { type Column } from '@/lib/homes/home-query'
 import { type HomeRow } from '@/lib/homes/home-row'
@@ -23,14 +23,15 @@ const named = (value: string, names: Readonly<Record<string, string>>): ReactNod
   value === 'unknown' ? unknown : names[value]
 
 function Inspected({ home }: { home: HomeRow }) {
-  if (home.inspectedOn) return <span className="whitespace-nowrap">{partialDateInWords(home.inspectedOn, 'short')}</span>
+  if (home.inspectedOn)
+    return <span className="whitespace-nowrap">{partialDateInWords(home.inspectedOn, 'short')}</span>
   return home.inspectionRecord === 'never' ? 'never' : unknown
 }
 
+const WORST_FIRST: readonly ClassificationCode[] = ['C1', 'C2', 'FI', 'C3']
+
 function Defects({ open }: Pick<HomeRow, 'open'>) {
-  const found = (['C1', 'C2', 'FI', 'C3'] as const satisfies readonly (typeof CLASSIFICATION_CODES)[number][]).filter(
-    (code) => open[code] > 0,
-  )
+  const found = WORST_FIRST.filter((code) => open[code] > 0)
   if (found.length === 0) return <span className="text-slate">none on file</span>
   return (
     <span className="flex flex-wrap gap-1">
@@ -70,7 +71,13 @@ export function cellOf(column: Column, home: HomeRow, today: CalendarDay): React
       return (
         <span className="flex items-center justify-end gap-3">
           <span className="figures font-semibold">{Math.round(home.score).toLocaleString('en-GB')}</span>
-          <RangeBar score={home.score} low={home.scoreLow} high={home.scoreHigh} nation={home.nation} size="list" />
+          <RangeBar
+            score={home.score}
+            low={home.scoreLow}
+            high={home.scoreHigh}
+            nation={home.nation}
+            size="list"
+          />
         </span>
       )
     case 'patch':

@@ -6,7 +6,13 @@ import { ChoiceRow } from '@/components/ui/choice-row'
 import { FilterChip } from '@/components/ui/filter-chip'
 import { Popover } from '@/components/ui/popover'
 import { TextField } from '@/components/ui/text-field'
-import { FILTER_NAMES, type FilterChoice, filtersOn, listAddress, type ListFilter } from '@/lib/homes/filter-names'
+import {
+  FILTER_NAMES,
+  type FilterChoice,
+  filtersOn,
+  listAddress,
+  type ListFilter,
+} from '@/lib/homes/filter-names'
 import { type HomeQuery, homeQueryOf } from '@/lib/homes/home-query'
 
 type Choices = Readonly<Record<ListFilter, readonly FilterChoice[]>>
@@ -24,7 +30,9 @@ function FilterPicker({ filter, query, choices, path }: PickerProps) {
           onSubmit={(event: SubmitEvent<HTMLFormElement>) => {
             event.preventDefault()
             const values = new FormData(event.currentTarget).getAll(filter).map(String)
-            router.push(listAddress(query, { [filter]: homeQueryOf({ [filter]: values })[filter] }, path), { scroll: false })
+            router.push(listAddress(query, { [filter]: homeQueryOf({ [filter]: values })[filter] }, path), {
+              scroll: false,
+            })
             close()
           }}
         >
@@ -54,20 +62,39 @@ function FilterPicker({ filter, query, choices, path }: PickerProps) {
 function BuiltPicker({ query, path }: { query: HomeQuery; path: string }) {
   const router = useRouter()
   return (
-    <Popover trigger="Built" label="Built" active={query.builtFrom !== undefined || query.builtTo !== undefined}>
+    <Popover
+      trigger="Built"
+      label="Built"
+      active={query.builtFrom !== undefined || query.builtTo !== undefined}
+    >
       {(close) => (
         <form
           onSubmit={(event: SubmitEvent<HTMLFormElement>) => {
             event.preventDefault()
             const form = new FormData(event.currentTarget)
-            const { builtFrom, builtTo } = homeQueryOf({ builtFrom: String(form.get('from')), builtTo: String(form.get('to')) })
+            const { builtFrom, builtTo } = homeQueryOf({
+              builtFrom: String(form.get('from')),
+              builtTo: String(form.get('to')),
+            })
             router.push(listAddress(query, { builtFrom, builtTo }, path), { scroll: false })
             close()
           }}
         >
           <div className="flex gap-4">
-            <TextField name="from" label="From" inputMode="numeric" width="tiny" defaultValue={String(query.builtFrom ?? '')} />
-            <TextField name="to" label="To" inputMode="numeric" width="tiny" defaultValue={String(query.builtTo ?? '')} />
+            <TextField
+              name="from"
+              label="From"
+              inputMode="numeric"
+              width="tiny"
+              defaultValue={String(query.builtFrom ?? '')}
+            />
+            <TextField
+              name="to"
+              label="To"
+              inputMode="numeric"
+              width="tiny"
+              defaultValue={String(query.builtTo ?? '')}
+            />
           </div>
           <Button type="submit" size="compact" className="w-full">
             Show these homes
@@ -78,10 +105,28 @@ function BuiltPicker({ query, path }: { query: HomeQuery; path: string }) {
   )
 }
 
-const ORDER: readonly ListFilter[] = ['board', 'patch', 'standing', 'cover', 'defects', 'tenure', 'block', 'nation']
+const ORDER: readonly ListFilter[] = [
+  'board',
+  'patch',
+  'standing',
+  'cover',
+  'defects',
+  'tenure',
+  'block',
+  'nation',
+  'duty',
+]
 
 /** The filters of a list of homes: those that are on, and those that can be put on. */
-export function ListFilters({ query, choices, path = '/homes' }: { query: HomeQuery; choices: Choices; path?: string }) {
+export function ListFilters({
+  query,
+  choices,
+  path = '/homes',
+}: {
+  query: HomeQuery
+  choices: Choices
+  path?: string
+}) {
   const on = filtersOn(query, choices)
   return (
     <div className="no-print flex flex-col gap-2" role="group" aria-label="Filters">

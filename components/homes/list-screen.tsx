@@ -46,7 +46,9 @@ function lineOf({ query, list }: Pick<Props, 'query' | 'list'>): string {
   const order = ORDER_WORDS[query.sort][query.order === 'asc' ? 0 : 1]
   if (list.answer)
     return `${whole(list.answer.rewireable)} with rewireable fuses, ${whole(list.answer.unknownBoard)} more not known, of ${whole(list.all)}. ${order}.`
-  return list.total === list.all ? `${whole(list.all)} homes. ${order}.` : `${whole(list.total)} of ${whole(list.all)} homes. ${order}.`
+  return list.total === list.all
+    ? `${whole(list.all)} homes. ${order}.`
+    : `${whole(list.total)} of ${whole(list.all)} homes. ${order}.`
 }
 
 /** The register: which homes, what is on their walls, where they stand, which first. */
@@ -93,8 +95,12 @@ export function ListScreen({ query, list, patches, blocks, byPatch, today, may }
             {may.export && list.total > 0 && (
               <Menu trigger="Export what is shown">
                 <MenuLabel>{whole(list.total)} homes, in this order and these columns</MenuLabel>
-                <ExportLink href={`/api/v1/homes/export?format=xlsx&${homeQueryText(query)}`}>Excel workbook (.xlsx)</ExportLink>
-                <ExportLink href={`/api/v1/homes/export?format=csv&${homeQueryText(query)}`}>Text (.csv)</ExportLink>
+                <ExportLink href={`/api/v1/homes/export?format=xlsx&${homeQueryText(query)}`}>
+                  Excel workbook (.xlsx)
+                </ExportLink>
+                <ExportLink href={`/api/v1/homes/export?format=csv&${homeQueryText(query)}`}>
+                  Text (.csv)
+                </ExportLink>
               </Menu>
             )}
           </>
@@ -126,7 +132,8 @@ export function ListScreen({ query, list, patches, blocks, byPatch, today, may }
           title="No home matches"
           actions={anyFilter && <ButtonLink href="/homes">Show every home</ButtonLink>}
         >
-          Take off a filter above, or look for fewer words. Unknown facts are a choice of their own in each filter.
+          Take off a filter above, or look for fewer words. Unknown facts are a choice of their own in each
+          filter.
         </EmptyState>
       ) : (
         <>

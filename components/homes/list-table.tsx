@@ -7,7 +7,12 @@ import { type Column, type HomeQuery, type Sort } from '@/lib/homes/home-query'
 import { type HomeRow } from '@/lib/homes/home-row'
 import { cellOf } from './list-cells'
 
-const SORT_OF: Partial<Record<Column, Sort>> = { score: 'score', standing: 'due', built: 'built', inspected: 'inspected' }
+const SORT_OF: Partial<Record<Column, Sort>> = {
+  score: 'score',
+  standing: 'due',
+  built: 'built',
+  inspected: 'inspected',
+}
 const NUMERIC: ReadonlySet<Column> = new Set(['score', 'rewired', 'bedrooms'])
 
 /** Which way a column is sorted first: the worst score and the earliest date are what people look for. */
@@ -17,7 +22,11 @@ function SortLink({ sort, query, children }: { sort: Sort; query: HomeQuery; chi
   const isOn = query.sort === sort
   const order = isOn ? (query.order === 'asc' ? 'desc' : 'asc') : firstOrder(sort)
   return (
-    <Link href={listAddress(query, { sort, order })} scroll={false} className="link-block inline-flex items-center gap-1 underline-offset-4 hover:underline">
+    <Link
+      href={listAddress(query, { sort, order })}
+      scroll={false}
+      className="link-block inline-flex items-center gap-1 underline-offset-4 hover:underline"
+    >
       {children}
       <span aria-hidden="true" className={isOn ? 'text-copper' : 'invisible'}>
         {query.order === 'asc' ? '↑' : '↓'}
@@ -30,7 +39,15 @@ const sortedBy = (sort: Sort | undefined, query: HomeQuery) =>
   sort !== undefined && query.sort === sort ? (query.order === 'asc' ? 'ascending' : 'descending') : undefined
 
 /** Homes, a row each, in the columns that were chosen. */
-export function ListTable({ homes, query, today }: { homes: readonly HomeRow[]; query: HomeQuery; today: CalendarDay }) {
+export function ListTable({
+  homes,
+  query,
+  today,
+}: {
+  homes: readonly HomeRow[]
+  query: HomeQuery
+  today: CalendarDay
+}) {
   return (
     <Table caption="Homes">
       <thead>
@@ -60,11 +77,17 @@ export function ListTable({ homes, query, today }: { homes: readonly HomeRow[]; 
         {homes.map((home) => (
           <Row key={home.id}>
             <RowHead className="min-w-44">
-              <Link href={`/homes/${home.id}`} prefetch={false} className="link-block text-ink underline-offset-4 hover:text-copper hover:underline">
+              <Link
+                href={`/homes/${home.id}`}
+                prefetch={false}
+                className="link-block text-ink underline-offset-4 hover:text-copper hover:underline"
+              >
                 {home.address}
               </Link>
               <span className="block text-sm font-normal text-slate">
-                {[home.kind === 'communal' && 'landlord supply', home.postcode, home.patch?.name].filter(Boolean).join(' · ')}
+                {[home.kind === 'communal' && 'landlord supply', home.postcode, home.patch?.name]
+                  .filter(Boolean)
+                  .join(' · ')}
               </span>
             </RowHead>
             {query.columns.map((column) => (

@@ -12,7 +12,13 @@ type PatchCount = {
 const whole = (n: number) => n.toLocaleString('en-GB')
 
 /** Which patches still have rewireable fuses, with the homes of which it is not known counted apart. */
-export function RewireableByPatch({ patches, caption = 'Still on rewireable fuses, by patch' }: { patches: readonly PatchCount[]; caption?: string }) {
+export function RewireableByPatch({
+  patches,
+  caption = 'Still on rewireable fuses, by patch',
+}: {
+  patches: readonly PatchCount[]
+  caption?: string
+}) {
   return (
     <Table caption={caption}>
       <thead>
@@ -29,12 +35,15 @@ export function RewireableByPatch({ patches, caption = 'Still on rewireable fuse
           <Row key={patch?.id ?? 'none'}>
             <RowHead className="font-normal">{patch?.name ?? 'In no patch'}</RowHead>
             <Cell numeric>
-              <Link className="link link-block" href={`/homes?board=rewireable-ways&patch=${patch?.id ?? 'none'}`}>
+              <Link
+                className="link-block link"
+                href={`/homes?board=rewireable-ways&patch=${patch?.id ?? 'none'}`}
+              >
                 {whole(withRewireableWays)}
               </Link>
             </Cell>
             <Cell numeric>
-              <Link className="link link-block" href={`/homes?board=unknown&patch=${patch?.id ?? 'none'}`}>
+              <Link className="link-block link" href={`/homes?board=unknown&patch=${patch?.id ?? 'none'}`}>
                 {whole(unknown)}
               </Link>
             </Cell>

@@ -15,7 +15,11 @@ export function ChooseColumns({ importId, layout, onChooseSheet, onCheck }: Prop
   return (
     <div className="space-y-6">
       <Card title="Where the list is" sub={layout.fileKind}>
-        <Form action={onChooseSheet} label="Sheet and header row" className="flex flex-wrap items-end gap-x-6">
+        <Form
+          action={onChooseSheet}
+          label="Sheet and header row"
+          className="flex flex-wrap items-end gap-x-6"
+        >
           <input type="hidden" name="importId" value={importId} />
           {layout.sheets.length > 1 ? (
             <SelectField
@@ -23,7 +27,10 @@ export function ChooseColumns({ importId, layout, onChooseSheet, onCheck }: Prop
               label="Sheet"
               width="medium"
               defaultValue={String(layout.sheet)}
-              choices={layout.sheets.map(({ name, index }) => ({ value: String(index), label: name || `Sheet ${index + 1}` }))}
+              choices={layout.sheets.map(({ name, index }) => ({
+                value: String(index),
+                label: name || `Sheet ${index + 1}`,
+              }))}
             />
           ) : (
             <input type="hidden" name="sheet" value={layout.sheet} />

@@ -30,7 +30,11 @@ export function ColumnChoices({ layout }: { layout: ImportLayout }) {
               <RowHead className="min-w-32">{words}</RowHead>
               <Cell className="max-w-72 text-sm text-slate">
                 <span className="line-clamp-2">
-                  {layout.sample.map((row) => row[column]).filter(Boolean).slice(0, 4).join(' · ') || 'nothing'}
+                  {layout.sample
+                    .map((row) => row[column])
+                    .filter(Boolean)
+                    .slice(0, 4)
+                    .join(' · ') || 'nothing'}
                 </span>
               </Cell>
               <Cell className="min-w-56">

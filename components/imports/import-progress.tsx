@@ -15,7 +15,15 @@ async function ask(importId: string): Promise<Answer> {
 }
 
 /** How far an import has got. When it has got there, the page is read again. It can be left: the work goes on. */
-export function ImportProgress({ importId, state, start }: { importId: string; state: string; start: Omit<Answer, 'state'> | null }) {
+export function ImportProgress({
+  importId,
+  state,
+  start,
+}: {
+  importId: string
+  state: string
+  start: Omit<Answer, 'state'> | null
+}) {
   const router = useRouter()
   const { data, isError } = useQuery({
     queryKey: ['import-progress', importId, state],

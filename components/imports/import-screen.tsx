@@ -60,7 +60,11 @@ export function ImportScreen({ shown, mayRun, isFirstPage, actions }: Props) {
     <>
       <PageHeader
         title={fileName}
-        sub={report ? `${whole(report.tally.data_rows)} rows: ${summaryOf(report, state === 'done')}, ${whole(rejected)} rejected.` : undefined}
+        sub={
+          report
+            ? `${whole(report.tally.data_rows)} rows: ${summaryOf(report, state === 'done')}, ${whole(rejected)} rejected.`
+            : undefined
+        }
         above={<Breadcrumb steps={[{ href: '/imports', label: 'Imports' }]} here={fileName} />}
         actions={
           mayCancel && (
@@ -89,19 +93,25 @@ export function ImportScreen({ shown, mayRun, isFirstPage, actions }: Props) {
             {state === 'checked' && mayRun && (
               <Notice
                 tone="plain"
-                title={rejected > 0 ? `${whole(rejected)} rows will be left out; the rest can go in now` : 'Every row can go in'}
+                title={
+                  rejected > 0
+                    ? `${whole(rejected)} rows will be left out; the rest can go in now`
+                    : 'Every row can go in'
+                }
                 actions={
                   <>
                     <Form action={actions.confirm} label="Confirm">
                       {hidden}
-                      <SubmitButton pendingText="Starting…">Take in {homes(report.homes.added + report.homes.changed)}</SubmitButton>
+                      <SubmitButton pendingText="Starting…">
+                        Take in {homes(report.homes.added + report.homes.changed)}
+                      </SubmitButton>
                     </Form>
                     {rejected > 0 && <RejectedFiles id={id} />}
                   </>
                 }
               >
-                Nothing has been taken in yet. Rejected rows can be mended and sent again later: homes already in the
-                register are recognised and not doubled.
+                Nothing has been taken in yet. Rejected rows can be mended and sent again later: homes already
+                in the register are recognised and not doubled.
               </Notice>
             )}
             {state === 'done' && (

@@ -52,10 +52,10 @@ export function ProblemTable({ page, severity, rejected, problems, next, isFirst
           <tbody>
             {problems.map(({ row, sequence, heading, why, cell }) => (
               <Row key={`${row}.${sequence}`}>
-                <RowHead className="figures text-right font-normal">{row}</RowHead>
+                <RowHead className="text-right figures font-normal">{row}</RowHead>
                 <Cell>{heading ?? 'the whole row'}</Cell>
                 <Cell>{why}</Cell>
-                <Cell className="figures max-w-80 break-words">{cell ?? ''}</Cell>
+                <Cell className="max-w-80 figures break-words">{cell ?? ''}</Cell>
               </Row>
             ))}
           </tbody>

@@ -15,8 +15,20 @@ export type Counts = {
 const STANDING_ORDER = ['lapsed', 'never inspected', 'unknown date', 'in date']
 const whole = (n: number) => n.toLocaleString('en-GB')
 
-function CountTable({ caption, counts, names, order }: { caption: string; counts: Counts['board']; names?: Readonly<Record<string, string>>; order: readonly string[] }) {
-  const rows = [...order, ...Object.keys(counts).filter((key) => !order.includes(key))].filter((key) => (counts[key] ?? 0) > 0)
+function CountTable({
+  caption,
+  counts,
+  names,
+  order,
+}: {
+  caption: string
+  counts: Counts['board']
+  names?: Readonly<Record<string, string>>
+  order: readonly string[]
+}) {
+  const rows = [...order, ...Object.keys(counts).filter((key) => !order.includes(key))].filter(
+    (key) => (counts[key] ?? 0) > 0,
+  )
   return (
     <Table caption={caption} showCaption>
       <thead className="sr-only">
@@ -28,7 +40,9 @@ function CountTable({ caption, counts, names, order }: { caption: string; counts
       <tbody>
         {rows.map((key) => (
           <Row key={key}>
-            <RowHead className="font-normal">{names?.[key] ?? key.replace(/^./, (letter) => letter.toUpperCase())}</RowHead>
+            <RowHead className="font-normal">
+              {names?.[key] ?? key.replace(/^./, (letter) => letter.toUpperCase())}
+            </RowHead>
             <Cell numeric>{whole(counts[key] ?? 0)}</Cell>
           </Row>
         ))}
@@ -41,8 +55,18 @@ function CountTable({ caption, counts, names, order }: { caption: string; counts
 export function ReportFigures({ counts, children }: { counts: Counts; children?: ReactNode }) {
   return (
     <div className="grid gap-4 md:grid-cols-3">
-      <CountTable caption="Consumer units" counts={counts.board} names={BOARD_TYPE_NAMES} order={Object.keys(BOARD_TYPE_NAMES)} />
-      <CountTable caption="RCD cover" counts={counts.rcd} names={RCD_COVER_NAMES} order={Object.keys(RCD_COVER_NAMES)} />
+      <CountTable
+        caption="Consumer units"
+        counts={counts.board}
+        names={BOARD_TYPE_NAMES}
+        order={Object.keys(BOARD_TYPE_NAMES)}
+      />
+      <CountTable
+        caption="RCD cover"
+        counts={counts.rcd}
+        names={RCD_COVER_NAMES}
+        order={Object.keys(RCD_COVER_NAMES)}
+      />
       <CountTable caption="Standing under the law" counts={counts.standing} order={STANDING_ORDER} />
       {children}
     </div>

@@ -30,7 +30,10 @@ function send(file: File, tell: (sending: Sending) => void): Promise<Answer> {
 }
 
 const wordsOf = ({ message, fault }: Answer) =>
-  message ?? (fault ? `Something went wrong on our side, and nothing was saved. If it happens again, quote ${fault}.` : null)
+  message ??
+  (fault
+    ? `Something went wrong on our side, and nothing was saved. If it happens again, quote ${fault}.`
+    : null)
 
 /** Uploads a stock list. Without any script it is an ordinary form that does the same. */
 export function UploadForm() {
@@ -61,7 +64,13 @@ export function UploadForm() {
       {(problems.length > 0 || message) && (
         <ErrorSummary key={attempt} formId={FORM} problems={problems} message={message} link={null} />
       )}
-      <form action="/api/v1/imports" method="post" encType="multipart/form-data" onSubmit={onSubmit} noValidate>
+      <form
+        action="/api/v1/imports"
+        method="post"
+        encType="multipart/form-data"
+        onSubmit={onSubmit}
+        noValidate
+      >
         <FileDrop
           name="file"
           label="Stock list"

@@ -1,7 +1,9 @@
-/** The note that stands under every page: what the program is, and who decides. */
-export function Footer() {
+import { classNames } from '@/components/ui/class-names'
+
+/** The note that stands under every page: what the program is, and who decides. `flush`: what stands above draws the line. */
+export function Footer({ flush }: { flush?: boolean }) {
   return (
-    <footer className="mt-16 border-t border-line print:mt-6">
+    <footer className={classNames('print:mt-6', !flush && 'mt-16 border-t border-line')}>
       <div className="page-width flex flex-wrap items-baseline justify-between gap-x-10 gap-y-2 py-6 text-sm text-slate">
         <p className="max-w-reading">
           Fuseward advises. Codes come from the inspector; a computed check is a prompt to look. What is safe

@@ -22,7 +22,10 @@ export function FirstStep({ step }: { step: 'import' | 'ask-a-manager' | 'ask-fo
           <ol className="list-decimal space-y-1 pl-5">
             <li>Import a spreadsheet, any columns in any order, or type in your homes one by one.</li>
             <li>Check what could not be read, row by row, before anything is taken in.</li>
-            <li>See which homes still have rewireable fuses, which reports have lapsed, and which home comes first.</li>
+            <li>
+              See which homes still have rewireable fuses, which reports have lapsed, and which home comes
+              first.
+            </li>
           </ol>
         </EmptyState>
       </>

@@ -17,9 +17,18 @@ type Props = {
 /** One home that wants something, in a list of such homes. */
 export function HomeCard({ home, tone = 'plain', children, aside }: Props) {
   return (
-    <li className={classNames('flex items-center gap-4 border border-l-4 border-line bg-surface px-4 py-2.5', EDGES[tone])}>
+    <li
+      className={classNames(
+        'flex items-center gap-4 border border-l-4 border-line bg-surface px-4 py-2.5',
+        EDGES[tone],
+      )}
+    >
       <div className="min-w-0 flex-1">
-        <Link href={`/homes/${home.id}`} prefetch={false} className="link-block font-semibold text-ink underline-offset-4 hover:text-copper hover:underline">
+        <Link
+          href={`/homes/${home.id}`}
+          prefetch={false}
+          className="link-block font-semibold text-ink underline-offset-4 hover:text-copper hover:underline"
+        >
           {home.address}
         </Link>
         <p className="text-sm text-slate">{[home.postcode, home.patch?.name].filter(Boolean).join(' · ')}</p>

@@ -3,7 +3,6 @@ import { BoardStrip } from '@/components/drawings/board-strip'
 import { CodeBadge } from '@/components/drawings/code-badge'
 import { DueLine } from '@/components/drawings/due-line'
 import { type DueLineWeek } from '@/components/drawings/due-line-weeks'
-import { StandingBadge } from '@/components/drawings/standing-badge'
 import { RewireableByPatch } from '@/components/homes/rewireable-by-patch'
 import { ButtonLink } from '@/components/ui/button-link'
 import { PageHeader } from '@/components/ui/page-header'
@@ -18,7 +17,10 @@ type Props = {
   today: CalendarDay
   shown: {
     readonly homes: number
-    readonly standing: Readonly<Record<Standing, number>>
+    readonly standing: Readonly<Record<Standing, number>> & {
+      readonly homes: number
+      readonly notOwed: number
+    }
     readonly noticeDays: number
     readonly weeks: readonly DueLineWeek[]
     readonly danger: {
@@ -27,7 +29,10 @@ type Props = {
       readonly worstC1: readonly HomeRow[]
       readonly oldestC2: readonly { readonly home: HomeRow; readonly raisedOn: CalendarDay | null }[]
     }
-    readonly rewireable: { readonly patches: Parameters<typeof RewireableByPatch>[0]['patches']; readonly unknown: number }
+    readonly rewireable: {
+      readonly patches: Parameters<typeof RewireableByPatch>[0]['patches']
+      readonly unknown: number
+    }
     readonly worst: readonly HomeRow[]
     readonly firstStep: 'import' | 'ask-a-manager' | 'ask-for-a-patch' | null
   }
@@ -42,11 +47,12 @@ function headline({ standing }: Props['shown']): string {
   return `${homes(without)} ${without === 1 ? 'has' : 'have'} no report in date`
 }
 
-function subline({ standing, homes: all, noticeDays }: Props['shown']): string {
-  const parts = [`Of ${homes(all)}: ${whole(standing.lapsed)} lapsed`]
+function subline({ standing, noticeDays }: Props['shown']): string {
+  const parts = [`Of ${homes(standing.homes)}: ${whole(standing.lapsed)} lapsed`]
   if (standing['never inspected']) parts.push(`${whole(standing['never inspected'])} never inspected`)
   if (standing['unknown date']) parts.push(`${whole(standing['unknown date'])} of unknown date`)
-  return `${parts.join(', ')}. Another ${whole(standing.due)} lapse within ${noticeDays} days.`
+  const leased = standing.notOwed ? ` ${homes(standing.notOwed)} on long leases are left aside.` : ''
+  return `${parts.join(', ')}. Another ${whole(standing.due)} lapse within ${noticeDays} days.${leased}`
 }
 
 /** What must be done now: what lapses when, what is dangerous, which homes first. */
@@ -80,17 +86,34 @@ export function TodayScreen({ today, shown }: Props) {
           </p>
           <ul className="space-y-2">
             {danger.worstC1.slice(0, 5).map((home) => (
-              <HomeCard key={home.id} home={home} tone="madder" aside={<CodeBadge code="C1" count={home.open.C1} plain />}>
-                <StandingBadge standing={home.standing} dueOn={home.dueOn} today={today} />
+              <HomeCard
+                key={home.id}
+                home={home}
+                tone="madder"
+                aside={<CodeBadge code="C1" count={home.open.C1} plain />}
+              >
+                <BoardStrip
+                  ways={home.ways}
+                  boardType={home.boardType}
+                  rcdCover={home.rcdCover}
+                  size="list"
+                />
               </HomeCard>
             ))}
           </ul>
-          {danger.withC1 > 5 && <More href="/homes?defects=C1">All {homes(danger.withC1)} with an open C1</More>}
+          {danger.withC1 > 5 && (
+            <More href="/homes?defects=C1">All {homes(danger.withC1)} with an open C1</More>
+          )}
           <h3 className="mt-6 mb-3 text-lg">Potentially dangerous, open longest</h3>
           {danger.oldestC2.length === 0 && <p className="text-slate">No C2 is open.</p>}
           <ul className="space-y-2">
             {danger.oldestC2.map(({ home, raisedOn }) => (
-              <HomeCard key={home.id} home={home} tone="amber" aside={<CodeBadge code="C2" count={home.open.C2} plain />}>
+              <HomeCard
+                key={home.id}
+                home={home}
+                tone="amber"
+                aside={<CodeBadge code="C2" count={home.open.C2} plain />}
+              >
                 {raisedOn ? `Found ${dayInWords(raisedOn)}` : 'Found on a day not known'}
               </HomeCard>
             ))}
@@ -112,8 +135,17 @@ export function TodayScreen({ today, shown }: Props) {
             </h2>
             <ol className="space-y-2">
               {shown.worst.slice(0, 6).map((home) => (
-                <HomeCard key={home.id} home={home} aside={<span className="figures font-semibold">{whole(Math.round(home.score))}</span>}>
-                  <BoardStrip ways={home.ways} boardType={home.boardType} rcdCover={home.rcdCover} size="list" />
+                <HomeCard
+                  key={home.id}
+                  home={home}
+                  aside={<span className="figures font-semibold">{whole(Math.round(home.score))}</span>}
+                >
+                  <BoardStrip
+                    ways={home.ways}
+                    boardType={home.boardType}
+                    rcdCover={home.rcdCover}
+                    size="list"
+                  />
                 </HomeCard>
               ))}
             </ol>
@@ -124,9 +156,21 @@ export function TodayScreen({ today, shown }: Props) {
               Stuck for want of a fact
             </h2>
             <ul className="space-y-1">
-              <Stuck href="/homes?standing=never+inspected" count={standing['never inspected']} words="never inspected" />
-              <Stuck href="/homes?standing=unknown+date" count={standing['unknown date']} words="with an inspection of unknown date" />
-              <Stuck href="/homes?board=unknown" count={rewireable.unknown} words="where nobody knows what is on the wall" />
+              <Stuck
+                href="/homes?standing=never+inspected&duty=owed"
+                count={standing['never inspected']}
+                words="never inspected"
+              />
+              <Stuck
+                href="/homes?standing=unknown+date&duty=owed"
+                count={standing['unknown date']}
+                words="with an inspection of unknown date"
+              />
+              <Stuck
+                href="/homes?board=unknown"
+                count={rewireable.unknown}
+                words="where nobody knows what is on the wall"
+              />
             </ul>
           </section>
         </div>
@@ -138,7 +182,7 @@ export function TodayScreen({ today, shown }: Props) {
 function More({ href, children }: { href: string; children: React.ReactNode }) {
   return (
     <p className="mt-3">
-      <Link href={href} className="link link-block">
+      <Link href={href} className="link-block link">
         {children}
       </Link>
     </p>
@@ -151,7 +195,7 @@ function Stuck({ href, count, words }: { href: string; count: number; words: str
       {count === 0 ? (
         <span className="text-slate">No home {words}</span>
       ) : (
-        <Link href={href} className="link link-block">
+        <Link href={href} className="link-block link">
           {homes(count)} {words}
         </Link>
       )}

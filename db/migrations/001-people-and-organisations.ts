@@ -94,7 +94,15 @@ export const peopleAndOrganisations: Migration = {
       key by_expiry (expire)
     )`,
   ],
-  down: ['rate_limits', 'password_resets', 'invitations', 'sessions', 'membership_patches', 'patches', 'memberships', 'people', 'organisations'].map(
-    (table) => `drop table ${table}`,
-  ),
+  down: [
+    'rate_limits',
+    'password_resets',
+    'invitations',
+    'sessions',
+    'membership_patches',
+    'patches',
+    'memberships',
+    'people',
+    'organisations',
+  ].map((table) => `drop table ${table}`),
 }

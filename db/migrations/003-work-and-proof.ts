@@ -115,5 +115,13 @@ export const workAndProof: Migration = {
       foreign key (organisation_id) references organisations (id)
     )`,
   ],
-  down: ['audit_entries', 'audit_heads', 'outbox', 'jobs', 'import_mappings', 'import_problems', 'imports'].map((table) => `drop table ${table}`),
+  down: [
+    'audit_entries',
+    'audit_heads',
+    'outbox',
+    'jobs',
+    'import_mappings',
+    'import_problems',
+    'imports',
+  ].map((table) => `drop table ${table}`),
 }

@@ -32,8 +32,8 @@ type Head = { sequence: number; hash: string }
 export async function record(scope: WritingScope, entry: AuditRecord): Promise<void> {
   const organisation_id = scope.organisationId
   const head =
-    ((await scope.db('audit_heads').where({ organisation_id }).forUpdate().first('sequence', 'hash')) as Head | undefined) ??
-    (await begin(scope))
+    ((await scope.db('audit_heads').where({ organisation_id }).forUpdate().first('sequence', 'hash')) as
+      Head | undefined) ?? (await begin(scope))
   const at = now()
   const chained = {
     organisationId: organisation_id,
@@ -133,7 +133,8 @@ export async function verify(scope: Scope): Promise<{ entries: number; broken: C
     for (const row of rows) {
       const sequence = Number(row.sequence)
       if (sequence !== entries + 1) return broken(entries + 1, 'an entry is missing')
-      if (row.previous_hash !== previous) return broken(sequence, 'it does not follow from the entry before it')
+      if (row.previous_hash !== previous)
+        return broken(sequence, 'it does not follow from the entry before it')
       const chained = {
         organisationId,
         sequence,
@@ -150,7 +151,8 @@ export async function verify(scope: Scope): Promise<{ entries: number; broken: C
     }
     if (rows.length < 5_000) break
   }
-  const head = (await scope.db('audit_heads').where({ organisation_id: organisationId }).first()) as Head | undefined
+  const head = (await scope.db('audit_heads').where({ organisation_id: organisationId }).first()) as
+    Head | undefined
   if (head && Number(head.sequence) !== entries) return broken(entries + 1, 'the last entries are missing')
   if (head && head.hash !== previous) return broken(entries, 'the head does not match the last entry')
   return { entries, broken: null }

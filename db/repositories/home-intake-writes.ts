@@ -16,7 +16,11 @@ export type PlacedPlan = {
 }
 
 /** Who wrote it, when it held, and where it came from: "stock-list.xlsx". */
-export type Provenance = { readonly actorId: string | null; readonly asOf: CalendarDay; readonly source: string }
+export type Provenance = {
+  readonly actorId: string | null
+  readonly asOf: CalendarDay
+  readonly source: string
+}
 
 const HOME_COLUMNS = [
   'organisation_id',
@@ -59,14 +63,25 @@ const homeValues = ({ homeId, patchId, blockId, plan: { identity } }: PlacedPlan
 export async function writeHomes(scope: WritingScope, plans: readonly PlacedPlan[]): Promise<void> {
   const added = plans.filter(({ plan }) => plan.known === null)
   const changed = plans.filter(({ plan }) => plan.changes.length > 0)
-  const rows = (some: readonly PlacedPlan[]) => some.map((placed) => [scope.organisationId, ...homeValues(placed)])
+  const rows = (some: readonly PlacedPlan[]) =>
+    some.map((placed) => [scope.organisationId, ...homeValues(placed)])
   await insertRows(scope.db, 'homes', HOME_COLUMNS, rows(added))
   const updates = HOME_COLUMNS.slice(2).map((column) => `\`${column}\`=values(\`${column}\`)`)
-  await insertRows(scope.db, 'homes', HOME_COLUMNS, rows(changed), `on duplicate key update ${updates.join(',')}`)
+  await insertRows(
+    scope.db,
+    'homes',
+    HOME_COLUMNS,
+    rows(changed),
+    `on duplicate key update ${updates.join(',')}`,
+  )
 }
 
 /** Adds facts, and takes the place of those they supersede; both stay. */
-export async function writeFacts(scope: WritingScope, plans: readonly PlacedPlan[], from: Provenance): Promise<void> {
+export async function writeFacts(
+  scope: WritingScope,
+  plans: readonly PlacedPlan[],
+  from: Provenance,
+): Promise<void> {
   const superseded = plans.flatMap(({ homeId, plan }) =>
     plan.facts.flatMap(({ supersedes }) => (supersedes === null ? [] : [[homeId, supersedes]])),
   )
@@ -79,7 +94,18 @@ export async function writeFacts(scope: WritingScope, plans: readonly PlacedPlan
   await insertRows(
     scope.db,
     'home_facts',
-    ['organisation_id', 'home_id', 'id', 'kind', 'value', 'source', 'as_of', 'as_of_precision', 'note', 'recorded_by'],
+    [
+      'organisation_id',
+      'home_id',
+      'id',
+      'kind',
+      'value',
+      'source',
+      'as_of',
+      'as_of_precision',
+      'note',
+      'recorded_by',
+    ],
     plans.flatMap(({ homeId, plan }) =>
       plan.facts.map(({ kind, value }) => [
         scope.organisationId,
@@ -98,8 +124,14 @@ export async function writeFacts(scope: WritingScope, plans: readonly PlacedPlan
 }
 
 /** Adds inspections; one of the same day from an earlier import is withdrawn, not overwritten. */
-export async function writeInspections(scope: WritingScope, plans: readonly PlacedPlan[], from: Provenance): Promise<void> {
-  const withdrawn = plans.flatMap(({ homeId, plan }) => (plan.withdraws === null ? [] : [[homeId, plan.withdraws]]))
+export async function writeInspections(
+  scope: WritingScope,
+  plans: readonly PlacedPlan[],
+  from: Provenance,
+): Promise<void> {
+  const withdrawn = plans.flatMap(({ homeId, plan }) =>
+    plan.withdraws === null ? [] : [[homeId, plan.withdraws]],
+  )
   for (let at = 0; at < withdrawn.length; at += 1_000)
     await scope
       .db('inspections')
@@ -143,7 +175,11 @@ export async function writeInspections(scope: WritingScope, plans: readonly Plac
 }
 
 /** Adds a defect for each that the file counts and the register lacks. */
-export async function writeDefects(scope: WritingScope, plans: readonly PlacedPlan[], from: Provenance): Promise<void> {
+export async function writeDefects(
+  scope: WritingScope,
+  plans: readonly PlacedPlan[],
+  from: Provenance,
+): Promise<void> {
   await insertRows(
     scope.db,
     'defects',
@@ -165,7 +201,10 @@ export async function writeDefects(scope: WritingScope, plans: readonly PlacedPl
           homeId,
           newId(),
           code,
-          `Counted in ${from.source}, row ${draft.row}; the file does not say what was observed`.slice(0, 500),
+          `Counted in ${from.source}, row ${draft.row}; the file does not say what was observed`.slice(
+            0,
+            500,
+          ),
           'import',
           draft.lastInspection?.day ?? null,
           draft.lastInspection?.precision ?? null,

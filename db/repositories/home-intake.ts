@@ -99,7 +99,10 @@ export async function listKnown(scope: Scope, ids: readonly string[]): Promise<M
       .select('home_id', 'code')
       .count('* as open')) as unknown as DefectRow[],
   ]
-  const known = new Map<string, KnownHome & { facts: Map<FactKind, KnownFact>; inspections: KnownInspection[] }>()
+  const known = new Map<
+    string,
+    KnownHome & { facts: Map<FactKind, KnownFact>; inspections: KnownInspection[] }
+  >()
   for (const row of homes)
     known.set(row.id, {
       id: row.id,
@@ -123,7 +126,8 @@ export async function listKnown(scope: Scope, ids: readonly string[]): Promise<M
       inspections: [],
       openDefects: { C1: 0, C2: 0, C3: 0, FI: 0 },
     })
-  for (const row of facts) known.get(row.home_id)?.facts.set(row.kind, { id: row.id, value: row.value, source: row.source })
+  for (const row of facts)
+    known.get(row.home_id)?.facts.set(row.kind, { id: row.id, value: row.value, source: row.source })
   for (const row of inspections)
     known.get(row.home_id)?.inspections.push({
       id: row.id,

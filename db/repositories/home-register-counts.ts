@@ -2,6 +2,7 @@
 import { type Reach } from '@/lib/access/reach'
 import { type CalendarDay } from '@/lib/calendar/calendar-day'
 import { type Standing } from '@/lib/homes/standing'
+import { OUT_OF_SCOPE } from '@/lib/homes/tenure'
 import { addDays } from '@/lib/calendar/add-days'
 import { type Scope } from '@/db/connection'
 import { filtered, type HomeFilter } from './home-register-filter'
@@ -15,6 +16,8 @@ const register = (scope: Scope, reach: Reach) =>
   )
 
 const HAS_REWIREABLE_WAYS = "register.board_type in ('rewireable', 'mixed')"
+/** The landlord owes the inspection: see isInScope in lib/homes/tenure. */
+const OWED = `register.tenure not in (${OUT_OF_SCOPE.map((tenure) => `'${tenure}'`).join(', ')})`
 const BOARD_UNKNOWN = "register.board_type = 'unknown'"
 
 /** Counts come back as numbers, sums as numbers or null where there was no row. */
@@ -103,7 +106,11 @@ export async function countByBlock(
   return rows.map((row) => ({ ...row, homes: Number(row.homes) }))
 }
 
-export type StandingCounts = Readonly<Record<Standing, number>> & { readonly homes: number }
+/** `homes` are those that the landlord owes an inspection; `notOwed` are the rest, on long leases. */
+export type StandingCounts = Readonly<Record<Standing, number>> & {
+  readonly homes: number
+  readonly notOwed: number
+}
 
 /** Homes with an open C1, and with an open C2. */
 export type DangerCounts = { readonly withC1: number; readonly withC2: number }
@@ -120,18 +127,23 @@ export async function countByStanding(
   const row = (await register(scope, reach)
     .select(
       scope.db.raw(
-        `count(*) as homes, sum(register.inspection_record = 'never') as never,
-         sum(coalesce(${dated} < ?, 0)) as lapsed,
-         sum(coalesce(${dated} between ? and ?, 0)) as due,
-         sum(coalesce(${dated} > ?, 0)) as in_date,
+        `count(*) as everything, sum(${OWED}) as homes,
+         sum(${OWED} and register.inspection_record = 'never') as never,
+         sum(${OWED} and coalesce(${dated} < ?, 0)) as lapsed,
+         sum(${OWED} and coalesce(${dated} between ? and ?, 0)) as due,
+         sum(${OWED} and coalesce(${dated} > ?, 0)) as in_date,
          sum(register.open_c1 > 0) as withC1, sum(register.open_c2 > 0) as withC2`,
         [today, today, noticeEnds, noticeEnds],
       ),
     )
-    .first()) as Record<'homes' | 'never' | 'lapsed' | 'due' | 'in_date' | 'withC1' | 'withC2', number | null>
-  const { homes, never, lapsed, due, in_date, ...danger } = numbers(row)
+    .first()) as Record<
+    'everything' | 'homes' | 'never' | 'lapsed' | 'due' | 'in_date' | 'withC1' | 'withC2',
+    number | null
+  >
+  const { everything, homes, never, lapsed, due, in_date, ...danger } = numbers(row)
   const standing = {
     homes,
+    notOwed: everything - homes,
     'never inspected': never,
     lapsed,
     due,
@@ -141,7 +153,7 @@ export async function countByStanding(
   return { standing, danger }
 }
 
-/** How many homes' reports end on each day of a span, ends included. */
+/** How many homes' reports end on each day of a span, ends included; only those that the landlord owes. */
 export async function countByDueDay(
   scope: Scope,
   reach: Reach,
@@ -150,6 +162,7 @@ export async function countByDueDay(
 ): Promise<{ day: CalendarDay; homes: number }[]> {
   const rows = (await register(scope, reach)
     .whereBetween('register.due_on', [from, to])
+    .whereNotIn('register.tenure', [...OUT_OF_SCOPE])
     .groupBy('register.due_on')
     .orderBy('register.due_on')
     .select({ day: 'register.due_on' })

@@ -5,6 +5,7 @@ import { addDays } from '@/lib/calendar/add-days'
 import { type CalendarDay } from '@/lib/calendar/calendar-day'
 import { type HomeQuery } from '@/lib/homes/home-query'
 import { type Standing } from '@/lib/homes/standing'
+import { OUT_OF_SCOPE } from '@/lib/homes/tenure'
 import { type Scope } from '@/db/connection'
 import { searchPatterns } from './home-register-search'
 import { withinReach } from './within-reach'
@@ -89,6 +90,8 @@ export function filtered(scope: Scope, filter: HomeFilter, leave: { board?: bool
   if (asked.cover.length > 0) query.whereIn('register.rcd_cover', asked.cover)
   if (asked.tenure.length > 0) query.whereIn('register.tenure', asked.tenure)
   if (asked.nation.length > 0) query.whereIn('register.nation', asked.nation)
+  if (asked.duty.length === 1)
+    query.where('register.tenure', asked.duty[0] === 'owed' ? 'not in' : 'in', [...OUT_OF_SCOPE])
   if (asked.standing.length > 0)
     query.andWhere((either) => asked.standing.forEach((standing) => whereStanding(either, standing, filter)))
   if (asked.defects.length > 0)

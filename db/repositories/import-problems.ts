@@ -37,7 +37,10 @@ const toProblem = (row: Row): KeptProblem => ({
 
 /** Forgets an import's problems, before it is checked anew. */
 export async function clear(scope: WritingScope, importId: string): Promise<void> {
-  await scope.db('import_problems').where({ organisation_id: scope.organisationId, import_id: importId }).delete()
+  await scope
+    .db('import_problems')
+    .where({ organisation_id: scope.organisationId, import_id: importId })
+    .delete()
 }
 
 /** Adds problems; `sequence` numbers those of one row. */
@@ -94,5 +97,8 @@ export async function list(
         .where('row_number', '>', after.row)
         .orWhere((same) => same.where('row_number', after.row).andWhere('sequence', '>', after.sequence)),
     )
-  return ((await query) as (Row & { sequence: number })[]).map((row) => ({ ...toProblem(row), sequence: row.sequence }))
+  return ((await query) as (Row & { sequence: number })[]).map((row) => ({
+    ...toProblem(row),
+    sequence: row.sequence,
+  }))
 }

@@ -4,7 +4,15 @@ import { type ImportLayout } from '@/lib/imports/import-layout'
 import { now } from '@/lib/platform/clock'
 import { type Scope, type WritingScope } from '@/db/connection'
 
-export const IMPORT_STATES = ['uploaded', 'checking', 'checked', 'importing', 'done', 'failed', 'cancelled'] as const
+export const IMPORT_STATES = [
+  'uploaded',
+  'checking',
+  'checked',
+  'importing',
+  'done',
+  'failed',
+  'cancelled',
+] as const
 export type ImportState = (typeof IMPORT_STATES)[number]
 
 export type Import<Report = unknown> = {
@@ -72,7 +80,10 @@ export async function getById(scope: Scope, id: string): Promise<Import> {
 
 /** Imports, newest first. */
 export async function list(scope: Scope, limit: number): Promise<Import[]> {
-  const rows = (await select(scope).orderBy('import.created_at', 'desc').orderBy('import.id', 'desc').limit(limit)) as Row[]
+  const rows = (await select(scope)
+    .orderBy('import.created_at', 'desc')
+    .orderBy('import.id', 'desc')
+    .limit(limit)) as Row[]
   return rows.map(toImport)
 }
 
@@ -109,7 +120,13 @@ export async function move(
   id: string,
   from: readonly ImportState[],
   to: ImportState,
-  change: { layout?: ImportLayout; report?: unknown; failure?: string | null; rowsTotal?: number | null; attempt?: number } = {},
+  change: {
+    layout?: ImportLayout
+    report?: unknown
+    failure?: string | null
+    rowsTotal?: number | null
+    attempt?: number
+  } = {},
 ): Promise<boolean> {
   const ended = to === 'done' || to === 'failed' || to === 'cancelled'
   const moved = await scope
@@ -129,7 +146,10 @@ export async function move(
 }
 
 /** The mapping that was last confirmed for the same headings. */
-export async function findMapping(scope: Scope, headingsKey: string): Promise<ImportLayout['mapping'] | null> {
+export async function findMapping(
+  scope: Scope,
+  headingsKey: string,
+): Promise<ImportLayout['mapping'] | null> {
   const row = (await scope
     .db('import_mappings')
     .where({ organisation_id: scope.organisationId, headings_key: headingsKey })
@@ -138,10 +158,19 @@ export async function findMapping(scope: Scope, headingsKey: string): Promise<Im
 }
 
 /** Keeps a mapping for the next file with the same headings. */
-export async function saveMapping(scope: WritingScope, headingsKey: string, mapping: ImportLayout['mapping']): Promise<void> {
+export async function saveMapping(
+  scope: WritingScope,
+  headingsKey: string,
+  mapping: ImportLayout['mapping'],
+): Promise<void> {
   await scope
     .db('import_mappings')
-    .insert({ organisation_id: scope.organisationId, headings_key: headingsKey, mapping: JSON.stringify(mapping), saved_at: now() })
+    .insert({
+      organisation_id: scope.organisationId,
+      headings_key: headingsKey,
+      mapping: JSON.stringify(mapping),
+      saved_at: now(),
+    })
     .onConflict()
     .merge(['mapping', 'saved_at'])
 }

@@ -20,9 +20,21 @@ export type ClaimedJob = {
   attempts: number
 }
 
-export type JobProgress = { state: 'waiting' | 'running' | 'done' | 'dead'; done: number; total: number | null; error: string | null }
+export type JobProgress = {
+  state: 'waiting' | 'running' | 'done' | 'dead'
+  done: number
+  total: number | null
+  error: string | null
+}
 
-type Row = { organisation_id: string; id: string; kind: string; payload: string; fence: number; attempts: number }
+type Row = {
+  organisation_id: string
+  id: string
+  kind: string
+  payload: string
+  fence: number
+  attempts: number
+}
 
 /** Queues a job, in the transaction of the change that caused it. */
 export async function enqueue(scope: WritingScope, job: NewJob): Promise<void> {
@@ -41,7 +53,11 @@ export async function enqueue(scope: WritingScope, job: NewJob): Promise<void> {
 }
 
 /** Claims the next job that is due, or one whose worker died; null where there is none. */
-export async function claim(scope: DeploymentScope, owner: string, leaseSeconds: number): Promise<ClaimedJob | null> {
+export async function claim(
+  scope: DeploymentScope,
+  owner: string,
+  leaseSeconds: number,
+): Promise<ClaimedJob | null> {
   const at = now()
   const candidates = (await scope
     .db('jobs')
@@ -94,11 +110,23 @@ export async function keep(
 
 /** Marks a claimed job as done; false where the lease was lost. */
 export async function markDone(scope: DeploymentScope, job: ClaimedJob): Promise<boolean> {
-  return (await held(scope, job).update({ state: 'done', finished_at: now(), lease_until: null, last_error: null })) === 1
+  return (
+    (await held(scope, job).update({
+      state: 'done',
+      finished_at: now(),
+      lease_until: null,
+      last_error: null,
+    })) === 1
+  )
 }
 
 /** Puts a claimed job back for another try, or gives it up where `retryAt` is null. */
-export async function markFailed(scope: DeploymentScope, job: ClaimedJob, why: string, retryAt: Date | null): Promise<void> {
+export async function markFailed(
+  scope: DeploymentScope,
+  job: ClaimedJob,
+  why: string,
+  retryAt: Date | null,
+): Promise<void> {
   await held(scope, job).update({
     state: retryAt ? 'waiting' : 'dead',
     due_at: retryAt ?? now(),
@@ -109,12 +137,23 @@ export async function markFailed(scope: DeploymentScope, job: ClaimedJob, why: s
 }
 
 /** How a job is getting on, by its kind and key. */
-export async function findProgress(scope: Scope, kind: string, businessKey: string): Promise<JobProgress | null> {
+export async function findProgress(
+  scope: Scope,
+  kind: string,
+  businessKey: string,
+): Promise<JobProgress | null> {
   const row = (await scope
     .db('jobs')
     .where({ organisation_id: scope.organisationId, kind, business_key: businessKey })
     .first('state', 'progress_done', 'progress_total', 'last_error')) as
-    | { state: JobProgress['state']; progress_done: number; progress_total: number | null; last_error: string | null }
+    | {
+        state: JobProgress['state']
+        progress_done: number
+        progress_total: number | null
+        last_error: string | null
+      }
     | undefined
-  return row ? { state: row.state, done: row.progress_done, total: row.progress_total, error: row.last_error } : null
+  return row
+    ? { state: row.state, done: row.progress_done, total: row.progress_total, error: row.last_error }
+    : null
 }

@@ -8,7 +8,10 @@ type Row = { id: string; name: string }
 
 /** Every patch or block of the organisation, by its folded name. */
 export async function listByName(scope: Scope, table: Table): Promise<Map<string, string>> {
-  const rows = (await scope.db(table).where('organisation_id', scope.organisationId).select('id', 'name')) as Row[]
+  const rows = (await scope
+    .db(table)
+    .where('organisation_id', scope.organisationId)
+    .select('id', 'name')) as Row[]
   return new Map(rows.map((row) => [foldName(row.name), row.id]))
 }
 
@@ -22,7 +25,9 @@ export async function addMissing(
   for (const name of names) {
     if (known.has(foldName(name))) continue
     const id = newId()
-    await scope.db(table).insert({ organisation_id: scope.organisationId, id, name: name.trim().replace(/\s+/g, ' ') })
+    await scope
+      .db(table)
+      .insert({ organisation_id: scope.organisationId, id, name: name.trim().replace(/\s+/g, ' ') })
     known.set(foldName(name), id)
   }
 }

@@ -55,7 +55,11 @@ export async function enqueue(scope: WritingScope, notice: Notice): Promise<void
 }
 
 /** Claims the next notice that is due, or one whose sender died: a conditional update that commits before any sending. */
-export async function claim(scope: DeploymentScope, owner: string, leaseSeconds: number): Promise<ClaimedNotice | null> {
+export async function claim(
+  scope: DeploymentScope,
+  owner: string,
+  leaseSeconds: number,
+): Promise<ClaimedNotice | null> {
   const at = now()
   const candidates = (await scope
     .db('outbox')
@@ -99,11 +103,24 @@ const EMPTIED = { body_text: '', body_html: '' }
 
 /** Marks a claimed notice as sent; false where the lease was lost to another worker. */
 export async function markSent(scope: DeploymentScope, notice: ClaimedNotice): Promise<boolean> {
-  return (await held(scope, notice).update({ state: 'sent', sent_at: now(), lease_until: null, last_error: null, ...EMPTIED })) === 1
+  return (
+    (await held(scope, notice).update({
+      state: 'sent',
+      sent_at: now(),
+      lease_until: null,
+      last_error: null,
+      ...EMPTIED,
+    })) === 1
+  )
 }
 
 /** Puts a claimed notice back for another try, or gives it up where `retryAt` is null. */
-export async function markFailed(scope: DeploymentScope, notice: ClaimedNotice, why: string, retryAt: Date | null): Promise<void> {
+export async function markFailed(
+  scope: DeploymentScope,
+  notice: ClaimedNotice,
+  why: string,
+  retryAt: Date | null,
+): Promise<void> {
   await held(scope, notice).update({
     state: retryAt ? 'waiting' : 'dead',
     due_at: retryAt ?? now(),

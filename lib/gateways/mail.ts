@@ -14,7 +14,9 @@ function connect(): Transporter {
     port: Number(at.port || (at.protocol === 'smtps:' ? 465 : 587)),
     secure: at.protocol === 'smtps:',
     ignoreTLS: at.hostname === '127.0.0.1',
-    auth: at.username ? { user: decodeURIComponent(at.username), pass: decodeURIComponent(at.password) } : undefined,
+    auth: at.username
+      ? { user: decodeURIComponent(at.username), pass: decodeURIComponent(at.password) }
+      : undefined,
     pool: true,
     connectionTimeout: 10_000,
     greetingTimeout: 10_000,

@@ -1,12 +1,13 @@
 /** The filters of the homes list: what each is called, what it can be, and which are on. */
-import { BOARD_FILTERS, homeQueryText, type HomeQuery } from './home-query'
+import { BOARD_FILTERS, DUTIES, homeQueryText, type HomeQuery } from './home-query'
 import { BOARD_TYPE_NAMES } from './board-type'
 import { NATION_NAMES, NATIONS } from './nation'
 import { RCD_COVER_NAMES, RCD_COVERS } from './rcd-cover'
 import { STANDINGS } from './standing'
 import { TENURE_NAMES, TENURES } from './tenure'
 
-export type ListFilter = 'patch' | 'block' | 'board' | 'cover' | 'standing' | 'tenure' | 'nation' | 'defects'
+export type ListFilter =
+  'patch' | 'block' | 'board' | 'cover' | 'standing' | 'tenure' | 'nation' | 'duty' | 'defects'
 export type FilterChoice = { readonly value: string; readonly label: string; readonly homes?: number }
 
 export const FILTER_NAMES: Record<ListFilter, string> = {
@@ -18,6 +19,7 @@ export const FILTER_NAMES: Record<ListFilter, string> = {
   tenure: 'Tenure',
   block: 'Block',
   nation: 'Nation',
+  duty: 'Inspection',
 }
 
 const firstUpper = (text: string) => text.replace(/^./, (letter) => letter.toUpperCase())
@@ -44,6 +46,10 @@ export const FIXED_CHOICES: Record<Exclude<ListFilter, 'patch' | 'block'>, reado
   ],
   tenure: TENURES.map((value) => ({ value, label: TENURE_NAMES[value] })),
   nation: NATIONS.map((value) => ({ value, label: NATION_NAMES[value] })),
+  duty: DUTIES.map((value) => ({
+    value,
+    label: value === 'owed' ? 'Owed by the landlord' : 'Not owed: on a long lease',
+  })),
 }
 
 /**
@@ -58,12 +64,16 @@ export function listAddress(query: HomeQuery, change: Partial<HomeQuery> = {}, p
 export type FilterOn = { readonly key: string; readonly label: string; readonly off: Partial<HomeQuery> }
 
 /** Every filter that is on, with the change of the query that takes it off. */
-export function filtersOn(query: HomeQuery, choices: Readonly<Record<ListFilter, readonly FilterChoice[]>>): FilterOn[] {
+export function filtersOn(
+  query: HomeQuery,
+  choices: Readonly<Record<ListFilter, readonly FilterChoice[]>>,
+): FilterOn[] {
   const on: FilterOn[] = []
   for (const filter of Object.keys(FILTER_NAMES) as ListFilter[]) {
     const values: readonly string[] = query[filter]
     for (const value of values) {
-      const label = choices[filter].find((choice) => choice.value === value)?.label ?? 'something that is gone'
+      const label =
+        choices[filter].find((choice) => choice.value === value)?.label ?? 'something that is gone'
       on.push({
         key: `${filter} ${value}`,
         label: `${FILTER_NAMES[filter]}: ${label}`,

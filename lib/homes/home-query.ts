@@ -42,6 +42,9 @@ export const FIRST_COLUMNS: readonly Column[] = [
 /** `rewireable` asks for every home with a rewireable way: boards of that type and mixed ones. */
 export const BOARD_FILTERS = ['rewireable-ways', ...BOARD_TYPES] as const
 
+/** Whether the landlord owes the inspection of a home. */
+export const DUTIES = ['owed', 'not-owed'] as const
+
 export const HomeQuery = z.object({
   search: z.string().trim().max(120).default(''),
   patch: z.array(z.union([z.uuid(), z.literal('none')])).default([]),
@@ -51,6 +54,8 @@ export const HomeQuery = z.object({
   standing: z.array(z.enum(STANDINGS)).default([]),
   tenure: z.array(z.enum(TENURES)).default([]),
   nation: z.array(z.enum(NATIONS)).default([]),
+  /** whether the landlord owes an inspection: see isInScope */
+  duty: z.array(z.enum(DUTIES)).default([]),
   defects: z.array(z.enum(['C1', 'C2', 'C3', 'FI', 'any'])).default([]),
   builtFrom: z.coerce.number().int().min(1000).max(2100).optional(),
   builtTo: z.coerce.number().int().min(1000).max(2100).optional(),
@@ -76,6 +81,7 @@ const LISTS = [
   'standing',
   'tenure',
   'nation',
+  'duty',
   'defects',
   'columns',
 ] as const

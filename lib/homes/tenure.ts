@@ -20,8 +20,11 @@ export const TENURE_NAMES: Record<Tenure, string> = {
   unknown: 'Not known',
 }
 
+/** Long leases, where the leaseholder answers for the wiring. */
+export const OUT_OF_SCOPE: readonly Tenure[] = ['shared-ownership', 'leasehold']
+
 /**
  * Whether the landlord's duty to inspect covers this tenure; unknown counts as covered.
  * @source SI 2020/312 Schedule 1: long leases, and rights of occupation of seven years or more, are excluded
  */
-export const isInScope = (tenure: Tenure): boolean => tenure !== 'shared-ownership' && tenure !== 'leasehold'
+export const isInScope = (tenure: Tenure): boolean => !OUT_OF_SCOPE.includes(tenure)

@@ -32,9 +32,17 @@ const Settings = z
     if (settings.FUSEWARD_DEPLOYMENT === 'demo') return
     for (const key of ['MAIL_URL', 'FILES_ENDPOINT'] as const)
       if (loopback(settings[key]))
-        context.addIssue({ code: 'custom', path: [key], message: `${key} points at a fake on loopback; a live deployment needs the real service` })
+        context.addIssue({
+          code: 'custom',
+          path: [key],
+          message: `${key} points at a fake on loopback; a live deployment needs the real service`,
+        })
     if (settings.FUSEWARD_TODAY)
-      context.addIssue({ code: 'custom', path: ['FUSEWARD_TODAY'], message: 'FUSEWARD_TODAY pins the date, which only a demo may do' })
+      context.addIssue({
+        code: 'custom',
+        path: ['FUSEWARD_TODAY'],
+        message: 'FUSEWARD_TODAY pins the date, which only a demo may do',
+      })
   })
 
 export type Settings = z.infer<typeof Settings>

@@ -32,6 +32,16 @@ export function canonicalJson(value: unknown): string {
 /** SHA-256 over the previous hash and every field of the entry, in a fixed order [hex]. */
 export function chainHash(previous: string, entry: ChainedEntry): string {
   const { organisationId, sequence, at, actorId, did, subjectKind, subjectId, detail } = entry
-  const text = JSON.stringify([previous, organisationId, sequence, at, actorId, did, subjectKind, subjectId, detail])
+  const text = JSON.stringify([
+    previous,
+    organisationId,
+    sequence,
+    at,
+    actorId,
+    did,
+    subjectKind,
+    subjectId,
+    detail,
+  ])
   return createHash('sha256').update(text).digest('hex')
 }

@@ -11,7 +11,18 @@ export function log(): Logger {
     base: undefined,
     timestamp: pino.stdTimeFunctions.isoTime,
     redact: {
-      paths: ['email', 'name', 'address', 'password', 'token', 'cookie', '*.email', '*.password', '*.token', '*.cookie'],
+      paths: [
+        'email',
+        'name',
+        'address',
+        'password',
+        'token',
+        'cookie',
+        '*.email',
+        '*.password',
+        '*.token',
+        '*.cookie',
+      ],
       censor: '[withheld]',
     },
   }))

@@ -73,8 +73,8 @@ export const ACTION_CALLS: Readonly<Record<string, Call>> = {
     closeDefect(actor, { homeId, defectId, closedOn: today, note: 'Bonded and tested.' }, today),
   'app/(office)/homes/[homeId]/actions.ts#change': (actor, { homeId, patchId }, today) =>
     changeHome(actor, ChangeHome.parse({ ...identity, homeId, patch: patchId }), today),
-  'app/(office)/imports/actions.ts#chooseSheet': (actor, { importId }) =>
-    changeLayout(actor, { importId, sheet: 0, headerRow: 1 }),
+  'app/(office)/imports/actions.ts#chooseSheet': (actor, { importId }, today) =>
+    changeLayout(actor, { importId, sheet: 0, headerRow: 1 }, today),
   'app/(office)/imports/actions.ts#check': (actor, { importId }) =>
     startCheck(actor, { importId, columns: [] }),
   'app/(office)/imports/actions.ts#confirm': (actor, { importId }) => confirmImport(actor, { importId }),

@@ -18,9 +18,17 @@ export async function benchImport(folder: string, rows: number, run: Run): Promi
   const { stdout } = await run(process.execPath, words, { maxBuffer: 1_000_000 })
   const taken = JSON.parse(stdout) as { milliseconds: number; peakMiB: number; added: number }
   if (taken.added !== rows) throw new Error(`the import added ${taken.added} homes of ${rows}`)
-  const bare = (await bareParse(path)) + (await bareInsert(process.env.DATABASE_URL_MIGRATE ?? '', manager.organisationId))
+  const bare =
+    (await bareParse(path)) +
+    (await bareInsert(process.env.DATABASE_URL_MIGRATE ?? '', manager.organisationId))
   return [
-    { what: 'import of the stock list', value: taken.milliseconds / 1000, unit: 's', bare: bare / 1000, most: 4 },
+    {
+      what: 'import of the stock list',
+      value: taken.milliseconds / 1000,
+      unit: 's',
+      bare: bare / 1000,
+      most: 4,
+    },
     { what: 'imported a second', value: (rows / taken.milliseconds) * 1000, unit: 'rows' },
     { what: 'peak memory of the import', value: taken.peakMiB, unit: 'MiB', most: 400, mostIs: 'value' },
   ]

@@ -64,7 +64,11 @@ export async function benchPages(actor: Actor, site: string): Promise<Figure[]> 
   }
   const cookie = await signInCookie(actor)
   const pages: readonly (readonly [string, string, () => Promise<unknown>])[] = [
-    ['Homes', '/homes', () => Promise.all([listHomes(actor, homeQueryOf({}), today), filterChoices(actor, today)])],
+    [
+      'Homes',
+      '/homes',
+      () => Promise.all([listHomes(actor, homeQueryOf({}), today), filterChoices(actor, today)]),
+    ],
     [
       'Homes with rewireable fuses',
       '/homes?board=rewireable-ways',
@@ -81,7 +85,13 @@ export async function benchPages(actor: Actor, site: string): Promise<Figure[]> 
     const statements = await statementsOf(work)
     const own = await timing(TIMES, () => firstByte(`${site}${path}`, cookie))
     const alone = await timing(TIMES, () => bare(statements))
-    figures.push({ what: `${name}, first byte, median`, value: own.median, unit: 'ms', bare: alone.median, most: 3 })
+    figures.push({
+      what: `${name}, first byte, median`,
+      value: own.median,
+      unit: 'ms',
+      bare: alone.median,
+      most: 3,
+    })
     figures.push({ what: `${name}, first byte, p95`, value: own.p95, unit: 'ms', bare: alone.p95 })
     figures.push({
       what: `${name}, statements`,

@@ -15,7 +15,8 @@ import { type Figure, printFigures } from './figures'
 const KEPT = join(import.meta.dirname, '../../.data')
 const { values } = parseArgs({ options: { homes: { type: 'string', default: '100000' } } })
 const homes = Number(values.homes)
-if (!Number.isInteger(homes) || homes < 100) throw new RangeError('--homes takes a whole number of 100 or more')
+if (!Number.isInteger(homes) || homes < 100)
+  throw new RangeError('--homes takes a whole number of 100 or more')
 
 const folder = join(KEPT, 'bench')
 mkdirSync(folder, { recursive: true })

@@ -10,7 +10,8 @@ export type Figure = {
   readonly mostIs?: 'ratio' | 'value'
 }
 
-const round = (value: number) => (value >= 100 ? Math.round(value).toLocaleString('en-GB') : value.toPrecision(3))
+const round = (value: number) =>
+  value >= 100 ? Math.round(value).toLocaleString('en-GB') : value.toPrecision(3)
 
 /** Whether a figure keeps what it must; null where nothing is asked of it. */
 export function keeps({ value, bare, most, mostIs = 'ratio' }: Figure): boolean | null {
@@ -35,5 +36,10 @@ export function printFigures(figures: readonly Figure[]): void {
   const all = [['what', 'measured', 'bare', 'ratio', 'target', ''], ...rows]
   const widths = all[0]?.map((_, column) => Math.max(...all.map((row) => (row[column] ?? '').length))) ?? []
   for (const row of all)
-    process.stdout.write(`${row.map((cell, column) => cell.padEnd(widths[column] ?? 0)).join('  ').trimEnd()}\n`)
+    process.stdout.write(
+      `${row
+        .map((cell, column) => cell.padEnd(widths[column] ?? 0))
+        .join('  ')
+        .trimEnd()}\n`,
+    )
 }

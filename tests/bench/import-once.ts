@@ -5,7 +5,12 @@ import { stopDatabase } from '@/lib/use-cases/jobs/stop-database'
 
 const [path = '', organisation = ''] = process.argv.slice(2)
 const began = performance.now()
-const { report } = await importFromFile({ path, organisation, today: calendarDay('2026-12-01'), dryRun: false })
+const { report } = await importFromFile({
+  path,
+  organisation,
+  today: calendarDay('2026-12-01'),
+  dryRun: false,
+})
 process.stdout.write(
   JSON.stringify({
     milliseconds: performance.now() - began,

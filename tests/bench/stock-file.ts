@@ -6,7 +6,16 @@ import { chance } from './chance'
 const HEADINGS =
   'Prop Ref,UPRN,No,Street,Town,Postcode,Patch,Tenure,Yr built,Type,Beds,Fuse board,RCD?,Wiring,Rewired,Last EICR,EICR result,C1,C2,FI,Easting,Northing,Notes'
 const LETTERS = 'ABDEFGHJLNPQRSTUWXYZ'
-const BOARDS = ['Rewireable', 'BS3036', 'MCBs', 'Circuit breakers', 'RCBO', 'cartridge', 'n/k', 'Mixed MCB / rewireable']
+const BOARDS = [
+  'Rewireable',
+  'BS3036',
+  'MCBs',
+  'Circuit breakers',
+  'RCBO',
+  'cartridge',
+  'n/k',
+  'Mixed MCB / rewireable',
+]
 const COVERS = ['No RCD', 'N', 'sockets', 'All circuits', 'split load', 'n/k']
 const TYPES = ['flat', 'mid terrace', 'semi', 'bungalow', 'end terrace']
 

@@ -1,4 +1,5 @@
 /** A home and its row in the register, straight into the database, with as much known as the test says. */
+import { addressSortOf, searchTextOf } from '@/db/repositories/home-register-search'
 import { inTransaction } from '@/db/connection'
 import { type BoardType } from '@/lib/homes/board-type'
 import { type Nation } from '@/lib/homes/nation'
@@ -68,8 +69,14 @@ export async function aHome(owner: { organisationId: string }, given: AHome = {}
       ...shared,
       organisation_id: organisationId,
       home_id: id,
-      address_sort: key,
-      search_text: [key, given.uprn, given.reference].filter(Boolean).join(' '),
+      address_sort: addressSortOf(address, 'Saltmarrow'),
+      search_text: searchTextOf({
+        address,
+        town: 'Saltmarrow',
+        postcode,
+        uprn: given.uprn === undefined ? null : String(given.uprn),
+        reference: given.reference ?? null,
+      }),
       board_type: given.boardType ?? 'unknown',
       rcd_cover: given.rcdCover ?? 'unknown',
       wiring: 'unknown',

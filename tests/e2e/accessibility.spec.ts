@@ -27,11 +27,18 @@ for (const { name, path, as, click = [], until } of PAGES)
           for (const target of click) await page.locator(target).click()
           if (until) await page.locator(until).first().waitFor()
           await page.waitForLoadState('networkidle')
-          const { violations } = await new AxeBuilder({ page }).withTags(TAGS).options({ rules: { 'target-size': { enabled: true } } }).analyze()
-          const found = violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`)
+          const { violations } = await new AxeBuilder({ page })
+            .withTags(TAGS)
+            .options({ rules: { 'target-size': { enabled: true } } })
+            .analyze()
+          const found = violations.map(
+            ({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`,
+          )
           expect(found, `${name} at ${width} px, ${theme}`).toEqual([])
           expect(blocked, 'blocked by the content policy').toEqual([])
-          const overflow = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth)
+          const overflow = await page.evaluate(
+            () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+          )
           expect(overflow, `${name} scrolls sideways at ${width} px`).toBeLessThanOrEqual(0)
           await context.close()
         }

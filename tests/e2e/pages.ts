@@ -15,6 +15,10 @@ export type PictureOf = {
   readonly until?: string
 }
 
+/** The first home of a list, and what shows that its page has come. */
+const FIRST_HOME = 'main tbody th a >> nth=0'
+const OF_A_HOME = 'h2:has-text("Why it ranks")'
+
 const OFFICE = ['manager', 'officer', 'auditor'] as const
 
 export const PAGES: readonly PictureOf[] = [
@@ -32,11 +36,77 @@ export const PAGES: readonly PictureOf[] = [
   { name: 'not-found', path: '/nowhere', as: ['visitor', 'manager'] },
   { name: 'today', path: '/today', as: [...OFFICE, 'landlord'] },
   { name: 'homes', path: '/homes', as: [...OFFICE, 'landlord'] },
-  { name: 'home', path: '/homes', as: ['manager', 'officer', 'landlord'], click: ['main tbody a >> nth=0'] },
-  { name: 'map', path: '/map', as: ['manager', 'landlord'] },
+  { name: 'homes-rewireable', path: '/homes?board=rewireable-ways', as: ['manager', 'officer'] },
+  { name: 'homes-none', path: '/homes?search=no+such+home', as: ['manager'] },
+  {
+    name: 'homes-columns',
+    path: '/homes?columns=board,cover,built,inspected,standing,defects,score,patch,block,tenure,type,wiring,rewired,bedrooms,reference,uprn,nation',
+    as: ['manager'],
+  },
+  {
+    name: 'homes-filter',
+    path: '/homes',
+    as: ['manager'],
+    click: ['main button:has-text("RCD cover")'],
+    until: '[role=dialog]',
+  },
+  {
+    name: 'home',
+    path: '/homes',
+    as: ['manager', 'officer', 'auditor', 'landlord'],
+    click: [FIRST_HOME],
+    until: OF_A_HOME,
+  },
+  {
+    name: 'home-unknown',
+    path: '/homes?standing=unknown+date',
+    as: ['manager'],
+    click: [FIRST_HOME],
+    until: OF_A_HOME,
+  },
+  {
+    name: 'home-facts',
+    path: '/homes',
+    as: ['manager'],
+    click: [FIRST_HOME, 'main a:has-text("Correct facts") >> nth=0'],
+    until: 'main form',
+  },
+  {
+    name: 'home-inspection',
+    path: '/homes',
+    as: ['manager'],
+    click: [FIRST_HOME, 'main a:has-text("Record an inspection") >> nth=0'],
+    until: 'main form',
+  },
+  {
+    name: 'home-defect',
+    path: '/homes',
+    as: ['manager'],
+    click: [FIRST_HOME, 'main a:has-text("Add a defect") >> nth=0'],
+    until: 'main form',
+  },
+  {
+    name: 'home-identity',
+    path: '/homes',
+    as: ['manager'],
+    click: [FIRST_HOME, 'main a:has-text("Change address") >> nth=0'],
+    until: 'main form',
+  },
+  { name: 'home-new', path: '/homes/new', as: ['manager', 'landlord'] },
+  { name: 'map', path: '/map', as: ['manager', 'officer', 'landlord'] },
+  { name: 'map-near', path: '/map?standing=lapsed&board=rewireable-ways', as: ['manager'] },
   { name: 'imports', path: '/imports', as: ['manager', 'auditor'] },
+  {
+    name: 'import',
+    path: '/imports',
+    as: ['manager'],
+    click: ['main tbody a >> nth=0'],
+    until: 'h2:has-text("Rows to look at")',
+  },
   { name: 'import-new', path: '/imports/new', as: ['manager'] },
   { name: 'people', path: '/people', as: ['manager', 'auditor'] },
   { name: 'settings', path: '/settings', as: ['manager', 'auditor'] },
+  { name: 'password', path: '/settings/password', as: ['manager'] },
+  { name: 'audit', path: '/audit', as: ['manager', 'auditor'] },
   { name: 'visits', path: '/visits', as: ['supervisor', 'electrician'] },
 ]

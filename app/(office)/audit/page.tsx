@@ -13,7 +13,11 @@ export const metadata: Metadata = { title: 'Audit trail' }
 
 type Props = { searchParams: Promise<Record<string, string | string[] | undefined>> }
 
-const when = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'medium', timeZone: 'Europe/London' })
+const when = new Intl.DateTimeFormat('en-GB', {
+  dateStyle: 'medium',
+  timeStyle: 'medium',
+  timeZone: 'Europe/London',
+})
 
 export default async function AuditPage({ searchParams }: Props) {
   const actor = await requireActor()
@@ -27,7 +31,9 @@ export default async function AuditPage({ searchParams }: Props) {
         sub={`${total.toLocaleString('en-GB')} entries, newest first. Each is tied to the one before it by a hash, and none can be changed or taken out.`}
       />
       {entries.length === 0 ? (
-        <EmptyState title="Nothing yet">Every change of the register appears here, with who made it and when.</EmptyState>
+        <EmptyState title="Nothing yet">
+          Every change of the register appears here, with who made it and when.
+        </EmptyState>
       ) : (
         <>
           <Table caption="Audit trail">
@@ -43,7 +49,7 @@ export default async function AuditPage({ searchParams }: Props) {
             <tbody>
               {entries.map((entry) => (
                 <Row key={entry.sequence}>
-                  <RowHead className="figures text-right font-normal">{entry.sequence}</RowHead>
+                  <RowHead className="text-right figures font-normal">{entry.sequence}</RowHead>
                   <Cell className="whitespace-nowrap">{when.format(new Date(entry.at))}</Cell>
                   <Cell>{entry.actorName ?? 'the program'}</Cell>
                   <Cell className="min-w-64">
@@ -54,7 +60,9 @@ export default async function AuditPage({ searchParams }: Props) {
                     ) : (
                       entryInWords(entry.did)
                     )}
-                    <span className="block text-sm break-words text-slate">{detailInWords(entry.detail)}</span>
+                    <span className="block text-sm break-words text-slate">
+                      {detailInWords(entry.detail)}
+                    </span>
                   </Cell>
                   <Cell className="figures text-sm" title={entry.hash}>
                     {entry.hash.slice(0, 10)}

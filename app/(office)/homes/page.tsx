@@ -25,8 +25,13 @@ export default async function HomesPage({ searchParams }: Props) {
       asksRewireable ? countRewireableByPatch(actor, day) : null,
     ]),
   )
-  const asChoice = ({ id, name, homes }: { id: string; name: string; homes: number }) => ({ value: id, label: name, homes })
-  const noPatch = choices.inNoPatch > 0 ? [{ value: 'none', label: 'In no patch', homes: choices.inNoPatch }] : []
+  const asChoice = ({ id, name, homes }: { id: string; name: string; homes: number }) => ({
+    value: id,
+    label: name,
+    homes,
+  })
+  const noPatch =
+    choices.inNoPatch > 0 ? [{ value: 'none', label: 'In no patch', homes: choices.inNoPatch }] : []
   return (
     <ListScreen
       query={query}
@@ -35,7 +40,11 @@ export default async function HomesPage({ searchParams }: Props) {
       blocks={choices.blocks.map(asChoice)}
       byPatch={byPatch?.patches ?? null}
       today={day}
-      may={{ run: can(actor, 'imports.run'), add: can(actor, 'homes.add'), export: can(actor, 'homes.export') }}
+      may={{
+        run: can(actor, 'imports.run'),
+        add: can(actor, 'homes.add'),
+        export: can(actor, 'homes.export'),
+      }}
     />
   )
 }

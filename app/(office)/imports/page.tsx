@@ -12,7 +12,11 @@ import { listImports } from '@/lib/use-cases/imports/list-imports'
 
 export const metadata: Metadata = { title: 'Imports' }
 
-const when = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeStyle: 'short', timeZone: 'Europe/London' })
+const when = new Intl.DateTimeFormat('en-GB', {
+  dateStyle: 'long',
+  timeStyle: 'short',
+  timeZone: 'Europe/London',
+})
 
 export default async function ImportsPage() {
   const actor = await requireActor()
@@ -20,11 +24,15 @@ export default async function ImportsPage() {
   const start = can(actor, 'imports.run') && <ButtonLink href="/imports/new">Import a stock list</ButtonLink>
   return (
     <>
-      <PageHeader title="Imports" sub="Stock lists taken into the register, and what came of each." actions={start} />
+      <PageHeader
+        title="Imports"
+        sub="Stock lists taken into the register, and what came of each."
+        actions={start}
+      />
       {imports.length === 0 ? (
         <EmptyState title="No stock list yet" actions={start}>
-          Bring the list of homes as you keep it: Excel or CSV, any columns in any order. You see every problem before
-          anything is taken in, and a second import of the same file changes nothing.
+          Bring the list of homes as you keep it: Excel or CSV, any columns in any order. You see every
+          problem before anything is taken in, and a second import of the same file changes nothing.
         </EmptyState>
       ) : (
         <Table caption="Imports, newest first">
@@ -55,9 +63,7 @@ export default async function ImportsPage() {
                 </Cell>
                 <Cell numeric>{one.report?.tally.data_rows.toLocaleString('en-GB') ?? ''}</Cell>
                 <Cell numeric>{one.report?.homes.added.toLocaleString('en-GB') ?? ''}</Cell>
-                <Cell numeric>
-                  {one.report?.rejected.toLocaleString('en-GB') ?? ''}
-                </Cell>
+                <Cell numeric>{one.report?.rejected.toLocaleString('en-GB') ?? ''}</Cell>
               </Row>
             ))}
           </tbody>

@@ -15,6 +15,7 @@ import { newId } from '@/lib/platform/new-id'
 import { refreshHomes } from '@/lib/use-cases/homes/refresh-homes'
 import { createDraftApplier } from '@/lib/use-cases/imports/apply-drafts'
 import { recordDetails } from './record-details'
+import { recordImport } from './record-import'
 
 export type DemoSignIn = {
   readonly organisation: string
@@ -117,6 +118,14 @@ async function addHomes(
   const applier = await createDraftApplier(scope, { actorId, source, nation, today, onClash })
   await applier.apply(homes.map(({ draft }) => draft))
   await applier.finish()
+  await recordImport(scope, {
+    fileName: source,
+    actorId,
+    nation,
+    drafts: homes.map(({ draft }) => draft),
+    today,
+    slips: homes.length > 100,
+  })
   if (refused.length > 0)
     throw new Error(`The demo's own stock list does not fit: ${refused.slice(0, 3).join('; ')}`)
   const keys = await findByKeys(scope, {

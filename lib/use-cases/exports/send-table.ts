@@ -23,7 +23,10 @@ export function sendTable({ name, format, headings, rows }: TableFile): Response
   const output = new PassThrough()
   const write = format === 'csv' ? writeCsv : writeXlsx
   write(headings, rows, output).catch((thrown: unknown) => {
-    log().error({ error: thrown instanceof Error ? thrown.message : String(thrown) }, 'a file could not be written to its end')
+    log().error(
+      { error: thrown instanceof Error ? thrown.message : String(thrown) },
+      'a file could not be written to its end',
+    )
     output.destroy(thrown instanceof Error ? thrown : new Error(String(thrown)))
   })
   const file = `${name.replace(/[^\p{L}\p{N} ._-]/gu, '').trim() || 'table'}.${format}`

@@ -39,6 +39,7 @@ export const asksForAll = (query: HomeQuery): boolean =>
     query.standing,
     query.tenure,
     query.nation,
+    query.duty,
     query.defects,
   ].every((chosen) => chosen.length === 0) &&
   [query.builtFrom, query.builtTo, query.dueFrom, query.dueTo, query.within].every(

@@ -47,8 +47,18 @@ export async function createDraftApplier(scope: WritingScope, context: ApplyCont
     applied.unchanged += plans.length - active.length
     for (const plan of plans) for (const what of plan.kept) kept[what] = (kept[what] ?? 0) + 1
     if (active.length === 0) return
-    await addMissing(scope, 'patches', active.flatMap(({ identity }) => identity.patch ?? []), patches)
-    await addMissing(scope, 'blocks', active.flatMap(({ identity }) => identity.block ?? []), blocks)
+    await addMissing(
+      scope,
+      'patches',
+      active.flatMap(({ identity }) => identity.patch ?? []),
+      patches,
+    )
+    await addMissing(
+      scope,
+      'blocks',
+      active.flatMap(({ identity }) => identity.block ?? []),
+      blocks,
+    )
     const placed = active.map((plan) => ({
       homeId: plan.known?.id ?? newId(),
       patchId: plan.identity.patch === null ? null : (patches.get(foldName(plan.identity.patch)) ?? null),
@@ -60,7 +70,11 @@ export async function createDraftApplier(scope: WritingScope, context: ApplyCont
     await intake.writeFacts(scope, placed, from)
     await intake.writeInspections(scope, placed, from)
     await intake.writeDefects(scope, placed, from)
-    await refreshHomes(scope, placed.map(({ homeId }) => homeId), context.today)
+    await refreshHomes(
+      scope,
+      placed.map(({ homeId }) => homeId),
+      context.today,
+    )
     for (const plan of active) for (const change of plan.changes) context.onChange?.(plan.draft.row, change)
   }
 

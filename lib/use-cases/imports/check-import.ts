@@ -20,27 +20,39 @@ async function checkImport({ organisationId, payload, today, progress }: JobCont
   const problemLog = createProblemLog(found.id, layout)
   const cellsOf = new Map<number, readonly Cell[]>()
   const report = await withStoredSheets(found.fileKey, (sheets) =>
-    rehearse(scope, sheets, layout, { today, nation }, {
-      onRow: ({ row, outcome }) => {
-        if (outcome.kind === 'accepted') cellsOf.set(row.number, row.cells)
-        if (outcome.kind === 'accepted' || outcome.kind === 'rejected') problemLog.addRow(row, outcome.problems)
+    rehearse(
+      scope,
+      sheets,
+      layout,
+      { today, nation },
+      {
+        onRow: ({ row, outcome }) => {
+          if (outcome.kind === 'accepted') cellsOf.set(row.number, row.cells)
+          if (outcome.kind === 'accepted' || outcome.kind === 'rejected')
+            problemLog.addRow(row, outcome.problems)
+        },
+        onClash: (row, why) => problemLog.addClash(row, why, cellsOf.get(row) ?? []),
+        onChange: (row, change) => problemLog.addChange(row, change),
+        afterChunk: async (rows) => {
+          cellsOf.clear()
+          await inTransaction({ organisationId }, (writing) => problemLog.write(writing))
+          await progress(rows, null)
+        },
       },
-      onClash: (row, why) => problemLog.addClash(row, why, cellsOf.get(row) ?? []),
-      onChange: (row, change) => problemLog.addChange(row, change),
-      afterChunk: async (rows) => {
-        cellsOf.clear()
-        await inTransaction({ organisationId }, (writing) => problemLog.write(writing))
-        await progress(rows, null)
-      },
-    }),
+    ),
   )
-  await imports.move(scope, found.id, ['checking'], 'checked', { report: figuresOf(report), rowsTotal: report.tally.data_rows })
+  await imports.move(scope, found.id, ['checking'], 'checked', {
+    report: figuresOf(report),
+    rowsTotal: report.tally.data_rows,
+  })
 }
 
 export const checkImportJob: Job = {
   kind: 'check-import',
   run: checkImport,
   giveUp: async ({ organisationId, payload }, why) => {
-    await imports.move(reading({ organisationId }), String(payload.importId), ['checking'], 'failed', { failure: why })
+    await imports.move(reading({ organisationId }), String(payload.importId), ['checking'], 'failed', {
+      failure: why,
+    })
   },
 }

@@ -22,7 +22,11 @@ export type FileImport = {
   readonly dryRun: boolean
 }
 
-export type FileImportResult = { readonly layout: ImportLayout; readonly report: ImportReport; readonly importId: string | null }
+export type FileImportResult = {
+  readonly layout: ImportLayout
+  readonly report: ImportReport
+  readonly importId: string | null
+}
 
 /**
  * Imports a local file for an organisation, as an operator does from the command line.
@@ -35,15 +39,36 @@ export async function importFromFile(file: FileImport): Promise<FileImportResult
   const scope = reading(owner)
   return withSheets(file.path, async (sheets) => {
     const guessed = await layoutOfSheet(scope, sheets, file.today)
-    const layout = file.mapping === undefined ? guessed : { ...guessed, mapping: mappingFromFile(file.mapping, guessed.headings) }
+    const layout =
+      file.mapping === undefined
+        ? guessed
+        : { ...guessed, mapping: mappingFromFile(file.mapping, guessed.headings) }
     if (layout.mapping.address === undefined && layout.mapping.street === undefined)
-      throw new Invalid([{ field: 'mapping', problem: 'No column was found that holds the address. Give a mapping file with --mapping.' }])
+      throw new Invalid([
+        {
+          field: 'mapping',
+          problem: 'No column was found that holds the address. Give a mapping file with --mapping.',
+        },
+      ])
     const { nation } = organisation
-    if (file.dryRun) return { layout, report: await rehearse(scope, sheets, layout, { today: file.today, nation }), importId: null }
+    if (file.dryRun)
+      return {
+        layout,
+        report: await rehearse(scope, sheets, layout, { today: file.today, nation }),
+        importId: null,
+      }
     const importId = newId()
     const fileName = basename(file.path)
     await inTransaction(owner, async (writing) => {
-      await imports.insert(writing, { id: importId, fileName, fileKey: '', fileSize: 0, fileSha256: '', layout, startedBy: null })
+      await imports.insert(writing, {
+        id: importId,
+        fileName,
+        fileKey: '',
+        fileSize: 0,
+        fileSha256: '',
+        layout,
+        startedBy: null,
+      })
       await imports.move(writing, importId, ['uploaded'], 'importing')
     })
     try {
@@ -61,7 +86,9 @@ export async function importFromFile(file: FileImport): Promise<FileImportResult
       return { layout, report, importId }
     } catch (thrown) {
       const failure = thrown instanceof Error ? thrown.message : String(thrown)
-      await imports.move(scope, importId, ['importing'], 'failed', { failure: `${failure} Nothing of the file was taken in.` })
+      await imports.move(scope, importId, ['importing'], 'failed', {
+        failure: `${failure} Nothing of the file was taken in.`,
+      })
       throw thrown
     }
   })

@@ -12,7 +12,10 @@ export type ImportReport = {
   readonly kept: Readonly<Record<string, number>>
 }
 
-type Figures = Pick<ImportTally, 'data_rows' | 'accepted' | 'board' | 'rcd' | 'standing' | 'out_of_scope_tenure'>
+type Figures = Pick<
+  ImportTally,
+  'data_rows' | 'accepted' | 'board' | 'rcd' | 'standing' | 'out_of_scope_tenure'
+>
 
 /** What is kept of a report with its import: the figures. The rows themselves are kept as its problems. */
 export type KeptReport = Omit<ImportReport, 'tally'> & { readonly tally: Figures; readonly rejected: number }

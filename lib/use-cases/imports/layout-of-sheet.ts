@@ -13,7 +13,12 @@ const PREVIEW_ROWS = 60
 const SAMPLE_ROWS = 5
 
 const DELIMITER_NAMES = { ',': 'commas', ';': 'semicolons', '\t': 'tabs', '|': 'upright strokes' } as const
-const ENCODING_NAMES = { 'utf-8': 'UTF-8', 'utf-16le': 'UTF-16', 'utf-16be': 'UTF-16', 'windows-1252': 'Windows-1252' } as const
+const ENCODING_NAMES = {
+  'utf-8': 'UTF-8',
+  'utf-16le': 'UTF-16',
+  'utf-16be': 'UTF-16',
+  'windows-1252': 'Windows-1252',
+} as const
 
 function kindInWords({ kind, delimiter, encoding }: SheetFile): string {
   if (kind === 'xlsx') return 'Excel workbook'
@@ -28,14 +33,23 @@ export async function layoutOfSheet(
   chosen: { sheet?: number; headerRow?: number } = {},
 ): Promise<ImportLayout> {
   const previews = await Promise.all(
-    sheets.sheets.map(async ({ name, index }) => ({ name, index, rows: await sheets.preview(index, PREVIEW_ROWS) })),
+    sheets.sheets.map(async ({ name, index }) => ({
+      name,
+      index,
+      rows: await sheets.preview(index, PREVIEW_ROWS),
+    })),
   )
   const preview = previews.find(({ index }) => index === (chosen.sheet ?? pickSheet(previews)?.index))
   if (!preview) throw new Invalid([{ field: 'sheet', problem: 'Choose one of the sheets in the file.' }])
   const headerRow = chosen.headerRow ?? findHeader(preview.rows).headerRow
   const header = preview.rows.find(({ number }) => number === headerRow)
   if (!header)
-    throw new Invalid([{ field: 'headerRow', problem: `There is nothing in row ${headerRow}. Give the row with the column headings.` }])
+    throw new Invalid([
+      {
+        field: 'headerRow',
+        problem: `There is nothing in row ${headerRow}. Give the row with the column headings.`,
+      },
+    ])
   const below = preview.rows.filter(({ number }) => number > headerRow)
   const headings = header.cells.map((cell) => cellText(cell).trim().slice(0, 120))
   const remembered = await imports.findMapping(scope, headingsKey(headings))

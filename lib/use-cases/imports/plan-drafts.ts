@@ -10,10 +10,15 @@ export type PlannedDrafts = {
   readonly clashes: readonly { readonly draft: HomeDraft; readonly why: string }[]
 }
 
-const present = (values: readonly (string | null)[]) => values.filter((value): value is string => value !== null)
+const present = (values: readonly (string | null)[]) =>
+  values.filter((value): value is string => value !== null)
 
 /** Finds the homes that some drafts are about, and decides what each draft changes. Reads only. */
-export async function planDrafts(scope: Scope, drafts: readonly HomeDraft[], nation: Nation): Promise<PlannedDrafts> {
+export async function planDrafts(
+  scope: Scope,
+  drafts: readonly HomeDraft[],
+  nation: Nation,
+): Promise<PlannedDrafts> {
   const keys = await findByKeys(scope, {
     uprns: present(drafts.map((draft) => draft.uprn)),
     references: present(drafts.map((draft) => draft.reference)),

@@ -10,7 +10,10 @@ type Waiting = problems.KeptProblem & { readonly sequence: number }
 const FIELD_OF: Partial<Record<keyof HomeIdentity, string>> = { addressKey: 'address' }
 
 /** Collects what is wrong with the rows of a file, and writes it in batches. */
-export function createProblemLog(importId: string, layout: { headings: readonly string[]; mapping: Mapping }) {
+export function createProblemLog(
+  importId: string,
+  layout: { headings: readonly string[]; mapping: Mapping },
+) {
   let waiting: Waiting[] = []
   const sequences = new Map<number, number>()
 
@@ -18,7 +21,12 @@ export function createProblemLog(importId: string, layout: { headings: readonly 
     const sequence = (sequences.get(row) ?? 0) + 1
     sequences.set(row, sequence)
     const column = one.field === null ? undefined : (layout.mapping as Record<string, number>)[one.field]
-    waiting.push({ ...one, row, sequence, heading: column === undefined ? null : (layout.headings[column] ?? null) })
+    waiting.push({
+      ...one,
+      row,
+      sequence,
+      heading: column === undefined ? null : (layout.headings[column] ?? null),
+    })
   }
 
   return {
@@ -42,7 +50,13 @@ export function createProblemLog(importId: string, layout: { headings: readonly 
     addChange(row: number, change: { field: keyof HomeIdentity; from: string; to: string }): void {
       if (change.field === 'addressKey') return
       const field = FIELD_OF[change.field] ?? change.field
-      add(row, { severity: 'noted', field, why: `${field} was ${change.from}`, cell: change.to, rawRow: null })
+      add(row, {
+        severity: 'noted',
+        field,
+        why: `${field} was ${change.from}`,
+        cell: change.to,
+        rawRow: null,
+      })
     },
     /** Writes what is waiting. A transaction that is begun again must begin with a new log. */
     async write(scope: WritingScope): Promise<void> {

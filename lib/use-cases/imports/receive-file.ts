@@ -26,7 +26,8 @@ function limited(most: number): Transform {
   return new Transform({
     transform(chunk: Buffer, _encoding, done) {
       seen += chunk.length
-      if (seen > most) done(refuse(`The file is larger than ${most / 1024 / 1024} MB. Split it, or leave out columns.`))
+      if (seen > most)
+        done(refuse(`The file is larger than ${most / 1024 / 1024} MB. Split it, or leave out columns.`))
       else done(null, chunk)
     },
   })
@@ -51,14 +52,22 @@ const tidyName = (name: string) =>
  * @returns the new import's id
  * @throws Invalid where the file is empty, too large, or of a kind that cannot be read
  */
-export async function receiveFile(actor: Actor, upload: { name: string; content: ReadableStream<Uint8Array> | null }, today: CalendarDay) {
+export async function receiveFile(
+  actor: Actor,
+  upload: { name: string; content: ReadableStream<Uint8Array> | null },
+  today: CalendarDay,
+) {
   demand(actor, 'imports.run')
   const { content } = upload
   if (!content) throw refuse('Choose a file to upload.')
   const fileName = tidyName(upload.name)
   return inScratchFolder(async (folder) => {
     const path = join(folder, 'upload')
-    await pipeline(Readable.fromWeb(content as Parameters<typeof Readable.fromWeb>[0]), limited(MOST_BYTES), createWriteStream(path))
+    await pipeline(
+      Readable.fromWeb(content as Parameters<typeof Readable.fromWeb>[0]),
+      limited(MOST_BYTES),
+      createWriteStream(path),
+    )
     const { sha256, size } = await hashOf(path)
     if (size === 0) throw refuse('The file is empty.')
     const layout = await withSheets(path, (sheets) => layoutOfSheet(reading(actor), sheets, today))
@@ -66,7 +75,15 @@ export async function receiveFile(actor: Actor, upload: { name: string; content:
     const fileKey = `imports/${actor.organisationId}/${id}`
     await putFile(fileKey, path, size)
     await inTransaction(actor, async (scope) => {
-      await imports.insert(scope, { id, fileName, fileKey, fileSize: size, fileSha256: sha256, layout, startedBy: actor.personId })
+      await imports.insert(scope, {
+        id,
+        fileName,
+        fileKey,
+        fileSize: size,
+        fileSha256: sha256,
+        layout,
+        startedBy: actor.personId,
+      })
       await audit.record(scope, {
         actorId: actor.personId,
         did: 'import.uploaded',

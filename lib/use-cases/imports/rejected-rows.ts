@@ -18,7 +18,12 @@ export async function rejectedRows(actor: Actor, input: { importId: string }) {
     let after: { row: number; sequence: number } | null = null
     let waiting: { row: number; whys: string[]; cells: string[] } | null = null
     for (;;) {
-      const page: Awaited<ReturnType<typeof problems.list>> = await problems.list(scope, found.id, 'rejected', { after, limit: PAGE })
+      const page: Awaited<ReturnType<typeof problems.list>> = await problems.list(
+        scope,
+        found.id,
+        'rejected',
+        { after, limit: PAGE },
+      )
       for (const one of page) {
         if (waiting && waiting.row !== one.row) {
           yield [...waiting.cells, waiting.row, waiting.whys.join('; ')]
@@ -26,7 +31,12 @@ export async function rejectedRows(actor: Actor, input: { importId: string }) {
         }
         const why = one.heading ? `${one.heading}: ${one.why}` : one.why
         if (waiting) waiting.whys.push(why)
-        else waiting = { row: one.row, whys: [why], cells: headings.map((_, column) => cellText(one.rawRow?.[column])) }
+        else
+          waiting = {
+            row: one.row,
+            whys: [why],
+            cells: headings.map((_, column) => cellText(one.rawRow?.[column])),
+          }
         after = { row: one.row, sequence: one.sequence }
       }
       if (page.length < PAGE) break
@@ -34,5 +44,9 @@ export async function rejectedRows(actor: Actor, input: { importId: string }) {
     if (waiting) yield [...waiting.cells, waiting.row, waiting.whys.join('; ')]
   }
 
-  return { fileName: found.fileName, headings: [...headings, 'Row in your file', 'Why it was not taken'], rows: rows() }
+  return {
+    fileName: found.fileName,
+    headings: [...headings, 'Row in your file', 'Why it was not taken'],
+    rows: rows(),
+  }
 }

@@ -20,7 +20,10 @@ export const ShowImport = z.object({
     .catch(undefined),
 })
 
-const JOB_OF: Partial<Record<imports.ImportState, string>> = { checking: 'check-import', importing: 'apply-import' }
+const JOB_OF: Partial<Record<imports.ImportState, string>> = {
+  checking: 'check-import',
+  importing: 'apply-import',
+}
 
 /** One import: where it is, what it found, and a page of its problems. */
 export async function showImport(actor: Actor, input: z.infer<typeof ShowImport>) {
@@ -31,7 +34,9 @@ export async function showImport(actor: Actor, input: z.infer<typeof ShowImport>
   const job = kind ? await jobs.findProgress(scope, kind, `${found.id}:${found.attempt}`) : null
   const [row, sequence] = (input.after ?? '').split('.').map(Number)
   const after = row !== undefined && sequence !== undefined ? { row, sequence } : null
-  const listed = found.report ? await problems.list(scope, found.id, input.severity, { after, limit: PAGE + 1 }) : []
+  const listed = found.report
+    ? await problems.list(scope, found.id, input.severity, { after, limit: PAGE + 1 })
+    : []
   const page = listed.slice(0, PAGE)
   const last = page.at(-1)
   return {

@@ -22,14 +22,26 @@ export async function startCheck(actor: Actor, input: z.infer<typeof StartCheck>
     const found = await imports.getById(scope, input.importId)
     if (!found.layout) throw new Conflict('This import has no sheet chosen yet.')
     if (input.columns.length !== found.layout.headings.length)
-      throw new Conflict('The columns have changed since this page was loaded. Load it again and choose once more.')
+      throw new Conflict(
+        'The columns have changed since this page was loaded. Load it again and choose once more.',
+      )
     const { mapping, problems } = mappingOfColumns(input.columns)
     if (problems.length > 0) throw new Invalid(problems)
     const attempt = found.attempt + 1
     const layout = { ...found.layout, mapping }
-    if (!(await imports.move(scope, found.id, ['uploaded', 'checked'], 'checking', { layout, attempt, report: null })))
+    if (
+      !(await imports.move(scope, found.id, ['uploaded', 'checked'], 'checking', {
+        layout,
+        attempt,
+        report: null,
+      }))
+    )
       throw new Conflict('This import has moved on. Load the page again to see where it is.')
-    await jobs.enqueue(scope, { kind: 'check-import', businessKey: `${found.id}:${attempt}`, payload: { importId: found.id } })
+    await jobs.enqueue(scope, {
+      kind: 'check-import',
+      businessKey: `${found.id}:${attempt}`,
+      payload: { importId: found.id },
+    })
     return { id: found.id }
   })
 }

@@ -65,7 +65,8 @@ export function takeFileIn(scope: Scope, file: FileToTakeIn): Promise<ImportRepo
           drafts.push(outcome.draft)
           cellsOf.set(row.number, row.cells)
         }
-        if (outcome.kind === 'accepted' || outcome.kind === 'rejected') problemLog.addRow(row, outcome.problems)
+        if (outcome.kind === 'accepted' || outcome.kind === 'rejected')
+          problemLog.addRow(row, outcome.problems)
         if (rows % CHUNK === 0) {
           await applier.apply(drafts)
           drafts = []
@@ -78,7 +79,8 @@ export function takeFileIn(scope: Scope, file: FileToTakeIn): Promise<ImportRepo
       const homes = await applier.finish()
       await problemLog.write(writing)
       const report: ImportReport = { tally: tally.result(), homes, clashes, kept: applier.kept() }
-      if (!(await imports.move(writing, importId, ['importing'], 'done', { report: figuresOf(report) }))) return null
+      if (!(await imports.move(writing, importId, ['importing'], 'done', { report: figuresOf(report) })))
+        return null
       await imports.saveMapping(writing, headingsKey(layout.headings), layout.mapping)
       await audit.record(writing, {
         actorId: file.actorId,

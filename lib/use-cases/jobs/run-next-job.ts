@@ -22,9 +22,15 @@ export async function runNextJob(owner: string, known: ReadonlyMap<string, Job>)
   const claimed = await jobs.claim(scope, owner, LEASE_SECONDS)
   if (!claimed) return false
   const job = known.get(claimed.kind)
-  const about = { job: claimed.kind, id: claimed.id, organisation: claimed.organisationId, attempt: claimed.attempts }
+  const about = {
+    job: claimed.kind,
+    id: claimed.id,
+    organisation: claimed.organisationId,
+    attempt: claimed.attempts,
+  }
   const keep = async (progress?: { done: number; total: number | null }) => {
-    if (!(await jobs.keep(scope, claimed, LEASE_SECONDS, progress))) throw new LeaseLost('another worker has this job now')
+    if (!(await jobs.keep(scope, claimed, LEASE_SECONDS, progress)))
+      throw new LeaseLost('another worker has this job now')
   }
   const context: JobContext = {
     organisationId: claimed.organisationId,
@@ -46,9 +52,21 @@ export async function runNextJob(owner: string, known: ReadonlyMap<string, Job>)
     }
     const why = thrown instanceof Error ? thrown.message : String(thrown)
     const giveUp = isRefusal(thrown) || claimed.attempts >= MOST_ATTEMPTS
-    await jobs.markFailed(scope, claimed, why, giveUp ? null : new Date(now().getTime() + pauseAfter(claimed.attempts)))
-    if (giveUp) await job?.giveUp?.(context, isRefusal(thrown) ? why : 'The program failed at it several times and has stopped trying.')
-    log().error({ ...about, gaveUp: giveUp, error: why, stack: thrown instanceof Error ? thrown.stack : undefined }, 'job failed')
+    await jobs.markFailed(
+      scope,
+      claimed,
+      why,
+      giveUp ? null : new Date(now().getTime() + pauseAfter(claimed.attempts)),
+    )
+    if (giveUp)
+      await job?.giveUp?.(
+        context,
+        isRefusal(thrown) ? why : 'The program failed at it several times and has stopped trying.',
+      )
+    log().error(
+      { ...about, gaveUp: giveUp, error: why, stack: thrown instanceof Error ? thrown.stack : undefined },
+      'job failed',
+    )
   } finally {
     clearInterval(heartbeat)
   }

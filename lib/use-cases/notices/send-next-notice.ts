@@ -20,11 +20,22 @@ export async function sendNextNotice(owner: string): Promise<boolean> {
   if (!notice) return false
   const about = { notice: notice.id, organisation: notice.organisationId, attempt: notice.attempts }
   try {
-    await sendMail({ id: notice.id, to: notice.to, subject: notice.subject, text: notice.text, html: notice.html })
+    await sendMail({
+      id: notice.id,
+      to: notice.to,
+      subject: notice.subject,
+      text: notice.text,
+      html: notice.html,
+    })
   } catch (thrown) {
     const why = thrown instanceof Error ? thrown.message : String(thrown)
     const giveUp = notice.attempts >= MOST_ATTEMPTS
-    await outbox.markFailed(scope, notice, why, giveUp ? null : new Date(now().getTime() + pauseAfter(notice.attempts)))
+    await outbox.markFailed(
+      scope,
+      notice,
+      why,
+      giveUp ? null : new Date(now().getTime() + pauseAfter(notice.attempts)),
+    )
     log().warn({ ...about, gaveUp: giveUp, error: why }, 'notice not sent')
     return true
   }

@@ -16,7 +16,7 @@ import { standingOn } from '@/lib/use-cases/homes/filter-for'
 export type Today = {
   readonly homes: number
   readonly standing: counts.StandingCounts
-  /** homes in date or due, of all [0 to 1]; one never inspected or of unknown date is not in date. Null without homes */
+  /** homes in date or due, of those that the landlord owes [0 to 1]; one never inspected or of unknown date is not in date. Null without homes */
   readonly inDateShare: number | null
   readonly noticeDays: number
   /** the due line: a quarter of a year back, a year on */
@@ -71,11 +71,11 @@ export async function showToday(actor: Actor, today: CalendarDay): Promise<Today
   const shown = await homeList.listByIds(scope, reach, ids)
   const byId = new Map(shown.map(standingOn(today, noticeDays)).map((home) => [home.id, home]))
   const pick = (some: readonly string[]) => some.flatMap((id) => byId.get(id) ?? [])
-  const { homes } = standing
+  const homes = standing.homes + standing.notOwed
   return {
     homes,
     standing,
-    inDateShare: homes === 0 ? null : (standing['in date'] + standing.due) / homes,
+    inDateShare: standing.homes === 0 ? null : (standing['in date'] + standing.due) / standing.homes,
     noticeDays,
     weeks: dueWeeks(days, today, { weeksBack: WEEKS_BACK, weeksOn: WEEKS_ON }),
     danger: {

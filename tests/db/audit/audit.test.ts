@@ -8,13 +8,21 @@ import { type AnOrganisation, anOrganisation } from '@/tests/builders/an-organis
 let own: AnOrganisation
 const write = (detail: Record<string, unknown> = {}) =>
   inTransaction(own.manager, (scope) =>
-    audit.record(scope, { actorId: own.manager.personId, did: 'home.fact-recorded', subjectKind: 'home', subjectId: 'h', detail }),
+    audit.record(scope, {
+      actorId: own.manager.personId,
+      did: 'home.fact-recorded',
+      subjectKind: 'home',
+      subjectId: 'h',
+      detail,
+    }),
   )
 const verdict = () => audit.verify(reading(own.manager))
 
 /** As somebody with the schema owner's password would, past the application. */
 async function tamper(sql: string, bindings: string[]): Promise<void> {
-  const address = Object.assign(new URL(inject('databases').migrate), { pathname: new URL(process.env.DATABASE_URL ?? '').pathname })
+  const address = Object.assign(new URL(inject('databases').migrate), {
+    pathname: new URL(process.env.DATABASE_URL ?? '').pathname,
+  })
   const owner = openPool(address.href, 1)
   await owner.raw(sql, bindings)
   await owner.destroy()
@@ -40,11 +48,31 @@ describe('the audit trail', () => {
   })
 
   it.each([
-    ['a changed entry', `update audit_entries set detail = '{"n":9}' where organisation_id = ? and sequence = 2`, 2, 'content'],
+    [
+      'a changed entry',
+      `update audit_entries set detail = '{"n":9}' where organisation_id = ? and sequence = 2`,
+      2,
+      'content',
+    ],
     ['a removed entry', 'delete from audit_entries where organisation_id = ? and sequence = 2', 2, 'missing'],
-    ['removed last entries', 'delete from audit_entries where organisation_id = ? and sequence > 2', 3, 'missing'],
-    ['a changed time', 'update audit_entries set at = at - interval 1 day where organisation_id = ? and sequence = 1', 1, 'content'],
-    ['another author', 'update audit_entries set actor_id = null where organisation_id = ? and sequence = 3', 3, 'content'],
+    [
+      'removed last entries',
+      'delete from audit_entries where organisation_id = ? and sequence > 2',
+      3,
+      'missing',
+    ],
+    [
+      'a changed time',
+      'update audit_entries set at = at - interval 1 day where organisation_id = ? and sequence = 1',
+      1,
+      'content',
+    ],
+    [
+      'another author',
+      'update audit_entries set actor_id = null where organisation_id = ? and sequence = 3',
+      3,
+      'content',
+    ],
   ])('finds %s', async (_what, sql, sequence, why) => {
     for (let n = 0; n < 3; n += 1) await write({ n })
     await tamper(sql, [own.organisationId])

@@ -4,11 +4,11 @@ import { beforeAll, describe, expect, it } from 'vitest'
 import { reading } from '@/db/connection'
 import * as homeList from '@/db/repositories/home-list'
 import { type CalendarDay } from '@/lib/calendar/calendar-day'
-import { BOARD_FILTERS, HomeQuery, homeQueryOf } from '@/lib/homes/home-query'
+import { BOARD_FILTERS, DUTIES, HomeQuery, homeQueryOf } from '@/lib/homes/home-query'
 import { type HomeRow } from '@/lib/homes/home-row'
 import { RCD_COVERS } from '@/lib/homes/rcd-cover'
 import { STANDINGS } from '@/lib/homes/standing'
-import { TENURES } from '@/lib/homes/tenure'
+import { isInScope, TENURES } from '@/lib/homes/tenure'
 import { filterFor } from '@/lib/use-cases/homes/filter-for'
 import { listHomes } from '@/lib/use-cases/homes/list-homes'
 import { type AnOrganisation } from '@/tests/builders/an-organisation'
@@ -61,6 +61,7 @@ const letsThrough = (home: HomeRow, query: HomeQuery): boolean =>
   has(query.standing, home.standing) &&
   has(query.tenure, home.tenure) &&
   has(query.nation, home.nation) &&
+  has(query.duty, isInScope(home.tenure) ? 'owed' : 'not-owed') &&
   (query.defects.length === 0 ||
     query.defects.some((code) =>
       code === 'any' ? Object.values(home.open).some((open) => open > 0) : home.open[code] > 0,
@@ -90,6 +91,7 @@ const aQuery = () => {
     cover: some(RCD_COVERS),
     standing: some(STANDINGS),
     tenure: some(TENURES),
+    duty: some(DUTIES),
     defects: some(['C1', 'C2', 'C3', 'FI', 'any'] as const),
     builtFrom: maybe(fc.integer({ min: 1880, max: 2020 })),
     builtTo: maybe(fc.integer({ min: 1880, max: 2020 })),

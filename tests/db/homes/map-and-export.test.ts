@@ -28,7 +28,6 @@ beforeAll(async () => {
 })
 
 const query = (given: Partial<HomeQuery> = {}): HomeQuery => ({ ...homeQueryOf({}), ...given })
-const count = (is: (home: HomeRow) => boolean) => every.filter(is).length
 const isRewireable = (home: HomeRow) => home.boardType === 'rewireable' || home.boardType === 'mixed'
 
 describe('the map', () => {

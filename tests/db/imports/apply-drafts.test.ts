@@ -62,8 +62,17 @@ async function apply(...drafts: HomeDraft[]) {
 
 async function known() {
   const scope = reading(own.manager)
-  const ids = (await scope.db('homes').where('organisation_id', own.organisationId).select('id')) as { id: string }[]
-  return [...(await listKnown(scope, ids.map(({ id }) => id))).values()]
+  const ids = (await scope.db('homes').where('organisation_id', own.organisationId).select('id')) as {
+    id: string
+  }[]
+  return [
+    ...(
+      await listKnown(
+        scope,
+        ids.map(({ id }) => id),
+      )
+    ).values(),
+  ]
 }
 
 beforeEach(async () => {
@@ -82,7 +91,12 @@ describe('applying drafts', () => {
 
   it('changes nothing the second time, whatever the case of a patch', async () => {
     await apply(draft())
-    expect(await apply(draft({ patch: ' NORTH' }))).toMatchObject({ added: 0, changed: 0, unchanged: 1, kept: {} })
+    expect(await apply(draft({ patch: ' NORTH' }))).toMatchObject({
+      added: 0,
+      changed: 0,
+      unchanged: 1,
+      kept: {},
+    })
   })
 
   it('supersedes an imported fact and keeps the older one', async () => {
@@ -123,13 +137,20 @@ describe('applying drafts', () => {
 
   it('tells what changed of an address or a tenure', async () => {
     await apply(draft())
-    expect((await apply(draft({ tenure: 'affordable-rent' }))).changes).toEqual(['tenure: social-rent to affordable-rent'])
+    expect((await apply(draft({ tenure: 'affordable-rent' }))).changes).toEqual([
+      'tenure: social-rent to affordable-rent',
+    ])
   })
 
   it('refuses a row whose UPRN and reference belong to two homes', async () => {
-    await apply(draft(), draft({ row: 3, reference: 'R-2', uprn: '100099000006', address: '2 Anchor Row', addressKey: '2' }))
+    await apply(
+      draft(),
+      draft({ row: 3, reference: 'R-2', uprn: '100099000006', address: '2 Anchor Row', addressKey: '2' }),
+    )
     const result = await apply(draft({ reference: 'R-2' }))
-    expect(result.clashes).toEqual(['2: its UPRN and its reference belong to two different homes in the register'])
+    expect(result.clashes).toEqual([
+      '2: its UPRN and its reference belong to two different homes in the register',
+    ])
     expect(result).toMatchObject({ added: 0, changed: 0 })
   })
 
@@ -142,7 +163,12 @@ describe('applying drafts', () => {
 
   it('leaves nothing behind where it dies half way', async () => {
     const dying = inTransaction(own.manager, async (scope) => {
-      const applier = await createDraftApplier(scope, { actorId: null, source: 'x', nation: 'england', today })
+      const applier = await createDraftApplier(scope, {
+        actorId: null,
+        source: 'x',
+        nation: 'england',
+        today,
+      })
       await applier.apply([draft()])
       await applier.finish()
       throw new Error('the process died')

@@ -44,7 +44,9 @@ describe('importing a stock list from a file', () => {
     expect(await homesNow()).toBe(expected.accepted)
     const { patches, totals } = await countRewireableByPatch(provider.manager, today)
     const counted = Object.fromEntries(
-      patches.flatMap(({ patch, withRewireableWays }) => (patch && withRewireableWays ? [[patch.name, withRewireableWays]] : [])),
+      patches.flatMap(({ patch, withRewireableWays }) =>
+        patch && withRewireableWays ? [[patch.name, withRewireableWays]] : [],
+      ),
     )
     expect(counted).toEqual(expected.rewireable_by_patch)
     expect(totals.unknown).toBe(expected.board.unknown)
@@ -60,13 +62,20 @@ describe('importing a stock list from a file', () => {
   it('takes a small landlord’s list with hardly any columns', async () => {
     const landlord = await anOrganisation({ name: 'Three Homes', kind: 'landlord' })
     const { slug: own } = await organisations.get(reading(landlord.manager))
-    const { report } = await importFromFile({ path: 'tests/fixtures/three-homes.csv', organisation: own, today, dryRun: false })
+    const { report } = await importFromFile({
+      path: 'tests/fixtures/three-homes.csv',
+      organisation: own,
+      today,
+      dryRun: false,
+    })
     expect(report.homes.added).toBe(3)
     const { rows } = await listHomes(landlord.manager, homeQueryOf({ sort: 'address', order: 'asc' }), today)
     expect(rows.map(({ boardType }) => boardType).sort()).toEqual(['breakers', 'rewireable', 'unknown'])
   })
 
   it('knows no organisation by a wrong name', async () => {
-    await expect(importFromFile({ path: STOCK, organisation: 'nobody', today, dryRun: true })).rejects.toThrow('nobody')
+    await expect(
+      importFromFile({ path: STOCK, organisation: 'nobody', today, dryRun: true }),
+    ).rejects.toThrow('nobody')
   })
 })

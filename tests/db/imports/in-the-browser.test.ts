@@ -35,7 +35,9 @@ const shown = (importId: string, actor = own.manager) => showImport(actor, { imp
 /** The choice of columns as the form sends it. */
 async function guessedColumns(importId: string) {
   const { layout } = (await shown(importId)).import
-  return (layout?.headings ?? []).map((_, column) => IMPORT_FIELDS.find((field) => layout?.mapping[field] === column) ?? '')
+  return (layout?.headings ?? []).map(
+    (_, column) => IMPORT_FIELDS.find((field) => layout?.mapping[field] === column) ?? '',
+  )
 }
 
 beforeAll(async () => {
@@ -56,17 +58,24 @@ describe('importing in the browser', () => {
     id = (await receiveFile(own.manager, { name: 'C:\\lists\\stock 2026.xlsx', content: stock() }, today)).id
     const { import: found } = await shown(id)
     expect(found).toMatchObject({ fileName: 'stock 2026.xlsx', state: 'uploaded' })
-    expect(found.layout).toMatchObject({ headerRow: 4, mapping: { uprn: 1, 'board-type': 12, 'last-inspection': 16 } })
+    expect(found.layout).toMatchObject({
+      headerRow: 4,
+      mapping: { uprn: 1, 'board-type': 12, 'last-inspection': 16 },
+    })
   })
 
   it('refuses a header row that is empty, and keeps what was chosen', async () => {
     const sheet = (await shown(id)).import.layout?.sheet ?? 0
-    await expect(changeLayout(own.manager, { importId: id, sheet, headerRow: 59_999 }, today)).rejects.toThrow('nothing in row')
+    await expect(
+      changeLayout(own.manager, { importId: id, sheet, headerRow: 59_999 }, today),
+    ).rejects.toThrow('nothing in row')
     expect((await shown(id)).import.layout?.headerRow).toBe(4)
   })
 
   it('refuses columns without an address', async () => {
-    const columns = (await guessedColumns(id)).map((field) => (field === 'street' || field === 'address' ? ('' as const) : field))
+    const columns = (await guessedColumns(id)).map((field) =>
+      field === 'street' || field === 'address' ? ('' as const) : field,
+    )
     await expect(startCheck(own.manager, { importId: id, columns })).rejects.toThrow('address')
   })
 
@@ -74,8 +83,13 @@ describe('importing in the browser', () => {
     await startCheck(own.manager, { importId: id, columns: await guessedColumns(id) })
     await work()
     const checked = await shown(id)
-    expect(checked.import).toMatchObject({ state: 'checked', report: { rejected: 10, homes: { added: 632 } } })
-    expect(checked.problems.map(({ row, heading, why }) => `${row} ${heading}: ${why}`)).toContain('213 C2: not a number')
+    expect(checked.import).toMatchObject({
+      state: 'checked',
+      report: { rejected: 10, homes: { added: 632 } },
+    })
+    expect(checked.problems.map(({ row, heading, why }) => `${row} ${heading}: ${why}`)).toContain(
+      '213 C2: not a number',
+    )
     expect((await listHomes(own.manager, homeQueryOf({}), today)).all).toBe(0)
   })
 
@@ -97,7 +111,9 @@ describe('importing in the browser', () => {
   })
 
   it('takes the homes in once, however often it is confirmed', async () => {
-    const answers = await Promise.allSettled([1, 2, 3].map(() => confirmImport(own.manager, { importId: id })))
+    const answers = await Promise.allSettled(
+      [1, 2, 3].map(() => confirmImport(own.manager, { importId: id })),
+    )
     expect(answers.filter(({ status }) => status === 'fulfilled')).toHaveLength(1)
     await work()
     expect((await shown(id)).import).toMatchObject({ state: 'done', report: { homes: { added: 632 } } })
@@ -118,7 +134,9 @@ describe('importing in the browser', () => {
     ['a PDF', '%PDF-1.7\n%âãÏÓ'],
   ])('refuses %s in plain words and keeps nothing', async (_what, content) => {
     const before = (await reading()).length
-    await expect(receiveFile(own.manager, { name: 'x.csv', content: text(content) }, today)).rejects.toMatchObject({ kind: 'invalid' })
+    await expect(
+      receiveFile(own.manager, { name: 'x.csv', content: text(content) }, today),
+    ).rejects.toMatchObject({ kind: 'invalid' })
     expect(await reading()).toHaveLength(before)
   })
 })

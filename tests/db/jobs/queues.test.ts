@@ -9,7 +9,9 @@ import { type AnOrganisation, anOrganisation } from '@/tests/builders/an-organis
 
 let own: AnOrganisation
 const queue = (businessKey: string, kind = 'count') =>
-  inTransaction(own.manager, (scope) => jobs.enqueue(scope, { kind, businessKey, payload: { key: businessKey } }))
+  inTransaction(own.manager, (scope) =>
+    jobs.enqueue(scope, { kind, businessKey, payload: { key: businessKey } }),
+  )
 const post = (businessKey: string) =>
   inTransaction(own.manager, (scope) =>
     outbox.enqueue(scope, { businessKey, to: 'a@harrowgate.example', subject: 's', text: 't', html: 'h' }),
@@ -62,17 +64,25 @@ describe('the job queue', () => {
     for (let attempt = 1; attempt <= 5; attempt += 1) {
       expect(await runNextJob('w', known)).toBe(true)
       expect(await runNextJob('w', known)).toBe(false)
-      await reading(own.manager).db('jobs').update({ due_at: new Date(0) }).where({ state: 'waiting' })
+      await reading(own.manager)
+        .db('jobs')
+        .update({ due_at: new Date(0) })
+        .where({ state: 'waiting' })
     }
     expect(given).toHaveLength(1)
-    expect(await jobs.findProgress(reading(own.manager), 'fail', 'k')).toMatchObject({ state: 'dead', error: 'no luck' })
+    expect(await jobs.findProgress(reading(own.manager), 'fail', 'k')).toMatchObject({
+      state: 'dead',
+      error: 'no luck',
+    })
   })
 })
 
 describe('the outbox', () => {
   it('gives each notice to one sender', async () => {
     for (let n = 0; n < 12; n += 1) await post(`n${n}`)
-    const claims = await Promise.all(Array.from({ length: 12 }, (_, n) => outbox.claim(deployment(), `s${n}`, 60)))
+    const claims = await Promise.all(
+      Array.from({ length: 12 }, (_, n) => outbox.claim(deployment(), `s${n}`, 60)),
+    )
     const ids = claims.flatMap((claim) => (claim ? [claim.id] : []))
     expect(new Set(ids).size).toBe(ids.length)
   })
@@ -81,10 +91,18 @@ describe('the outbox', () => {
     await post('n')
     await post('n')
     const failing = inTransaction(own.manager, async (scope) => {
-      await outbox.enqueue(scope, { businessKey: 'other', to: 'a@b.example', subject: 's', text: 't', html: 'h' })
+      await outbox.enqueue(scope, {
+        businessKey: 'other',
+        to: 'a@b.example',
+        subject: 's',
+        text: 't',
+        html: 'h',
+      })
       throw new Error('no')
     })
     await expect(failing).rejects.toThrow('no')
-    expect(await reading(own.manager).db('outbox').where('organisation_id', own.organisationId)).toHaveLength(1)
+    expect(await reading(own.manager).db('outbox').where('organisation_id', own.organisationId)).toHaveLength(
+      1,
+    )
   })
 })

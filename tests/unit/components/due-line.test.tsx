@@ -35,7 +35,9 @@ describe('due line', () => {
     fireEvent.keyDown(line, { key: 'ArrowRight' })
     fireEvent.keyDown(line, { key: 'ArrowRight', shiftKey: true })
     const link = screen.getByRole('link', { name: /List them/ })
-    expect(link.getAttribute('href')).toBe('/homes?dueFrom=2026-11-30&dueTo=2026-12-13&sort=due&order=asc')
+    expect(link.getAttribute('href')).toBe(
+      '/homes?dueFrom=2026-11-30&dueTo=2026-12-13&duty=owed&sort=due&order=asc',
+    )
     fireEvent.keyDown(line, { key: 'Enter' })
     expect(push).toHaveBeenCalledWith(link.getAttribute('href'))
   })

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest'
 import {
   BOARD_FILTERS,
   COLUMNS,
+  DUTIES,
   FIRST_COLUMNS,
   HomeQuery,
   homeQueryOf,
@@ -42,6 +43,7 @@ const anyQuery: fc.Arbitrary<HomeQuery> = fc.record({
   standing: some(STANDINGS),
   tenure: some(TENURES),
   nation: some(NATIONS),
+  duty: some(DUTIES),
   defects: some(['C1', 'C2', 'C3', 'FI', 'any'] as const),
   builtFrom: year,
   builtTo: year,

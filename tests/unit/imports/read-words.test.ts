@@ -81,6 +81,8 @@ describe('assessment', () => {
 
 it.each<[Cell, boolean]>([
   ['?', true], ['??', true], ['N/K', true], ['tbc', true], ['Not known', true], ['not sure', true], ['-', true],
+  ['-'.repeat(40), true],
+  ['unknown - no access to the cupboard', true],
   ['none', false], ['no', false], ['0', false],
 ])('%j says that it is not known: %j', (text, unknown) => {
   expect(saysUnknown(String(text))).toBe(unknown)

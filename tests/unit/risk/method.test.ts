@@ -52,7 +52,7 @@ describe('an unsound method', () => {
   const { beliefs } = FIRST_METHOD
   it.each<[string, Method, string]>([
     ['a better board that adds more', withSteps('board-type/rcbo', 1), 'board-type/breakers'],
-    ['a fact that outweighs a C1', withSteps('rcd-cover/none', 5.6), 'weighs as much as an open C1'],
+    ['a fact that outweighs a C1', withSteps('rcd-cover/none', 6), 'weighs as much as an open C1'],
     ['a row below 0', withSteps('inspection/term-end', -1), 'is below 0'],
     ['a row off the scale', withSteps('defects/C1-most', 17), 'not within 16 steps'],
     ['a row that is no number', withSteps('wiring/pvc', Number.NaN), 'not within 16 steps'],

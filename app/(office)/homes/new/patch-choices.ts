@@ -11,5 +11,7 @@ export async function patchChoices(actor: Actor): Promise<readonly Choice[]> {
   const seesAll = can(actor, 'organisation.read')
   const { patches } = seesAll ? await readSettings(actor) : await filterChoices(actor, today())
   const choices = patches.map(({ id, name }) => ({ value: id, label: name }))
-  return actor.patches === 'all' && choices.length > 0 ? [{ value: 'none', label: 'In no patch' }, ...choices] : choices
+  return actor.patches === 'all' && choices.length > 0
+    ? [{ value: 'none', label: 'In no patch' }, ...choices]
+    : choices
 }

@@ -17,7 +17,9 @@ type Props = {
 export default async function ImportPage({ params, searchParams }: Props) {
   const actor = await requireActor()
   const asked = ShowImport.safeParse({ ...(await searchParams), ...(await params) })
-  const shown = await show(asked.success ? showImport(actor, asked.data) : Promise.reject(new NotFound('That import')))
+  const shown = await show(
+    asked.success ? showImport(actor, asked.data) : Promise.reject(new NotFound('That import')),
+  )
   return (
     <ImportScreen
       shown={shown}

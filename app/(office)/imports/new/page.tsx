@@ -23,7 +23,10 @@ export default async function NewImportPage() {
         <aside>
           <h2 className="text-lg">What helps</h2>
           <ul className="mt-2 list-disc space-y-2 pl-5 text-slate">
-            <li>An address is all that a row must have. A UPRN or your own reference lets us know the home again.</li>
+            <li>
+              An address is all that a row must have. A UPRN or your own reference lets us know the home
+              again.
+            </li>
             <li>Dates as you write them: 3 August 2023, 03/08/2023, 3.8.23, Aug 2023 or just 2023.</li>
             <li>Boards in the words of the trade: rewireable, BS 3036, MCBs, RCBO, cartridge, mixed.</li>
             <li>“Not known” is a good answer. An empty cell never overwrites what the register knows.</li>

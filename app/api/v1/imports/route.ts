@@ -16,7 +16,11 @@ function demandOwnOrigin(request: Request): void {
 async function uploadOf(request: Request) {
   const isForm = request.headers.get('content-type')?.startsWith('multipart/form-data') ?? false
   if (!isForm)
-    return { isForm, name: decodeURIComponent(request.headers.get('x-file-name') ?? ''), content: request.body }
+    return {
+      isForm,
+      name: decodeURIComponent(request.headers.get('x-file-name') ?? ''),
+      content: request.body,
+    }
   if (Number(request.headers.get('content-length') ?? Infinity) > MOST_BYTES)
     throw new Invalid([{ field: 'file', problem: `The file is larger than ${MOST_BYTES / 1024 / 1024} MB.` }])
   const file = (await request.formData()).get('file')
@@ -34,7 +38,9 @@ export async function POST(request: Request): Promise<Response> {
     const { isForm, ...upload } = await uploadOf(request)
     const { id } = await receiveFile(actor, upload, today())
     const page = `/imports/${id}`
-    return isForm ? new Response(null, { status: 303, headers: { Location: page } }) : answer({ id, page }, 201)
+    return isForm
+      ? new Response(null, { status: 303, headers: { Location: page } })
+      : answer({ id, page }, 201)
   } catch (thrown) {
     return answerRefusal(thrown)
   }
