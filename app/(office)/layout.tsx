@@ -1,7 +1,8 @@
-import { type ReactNode } from 'react'
+import { type ReactNode, Suspense } from 'react'
 import { signOut, switchTo } from '@/app/actions'
 import { requireActor } from '@/app/session'
 import { Footer } from '@/components/shell/footer'
+import { GoingBar } from '@/components/shell/going-bar'
 import { QueryProvider } from '@/components/shell/query-provider'
 import { SkipLink } from '@/components/shell/skip-link'
 import { TopBar } from '@/components/shell/top-bar'
@@ -16,6 +17,9 @@ export default async function OfficeLayout({ children }: { children: ReactNode }
     <QueryProvider key={actor.organisationId}>
       <div className="flex min-h-dvh flex-col">
         <SkipLink />
+        <Suspense>
+          <GoingBar />
+        </Suspense>
         <TopBar actor={actor} others={others} onSwitch={switchTo} onSignOut={signOut} />
         <main id="main" tabIndex={-1} className="page-width flex-1 outline-none">
           {children}

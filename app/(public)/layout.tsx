@@ -5,6 +5,7 @@ import { Footer } from '@/components/shell/footer'
 import { SkipLink } from '@/components/shell/skip-link'
 import { StreetEdge } from '@/components/shell/street-edge'
 import { ButtonLink } from '@/components/ui/button-link'
+import { landingPathOf } from '@/lib/access/landing-path-of'
 import { optionalActor } from '../session'
 
 export default async function PublicLayout({ children }: { children: ReactNode }) {
@@ -19,7 +20,7 @@ export default async function PublicLayout({ children }: { children: ReactNode }
             <span className="font-display text-xl font-bold tracking-tight">Fuseward</span>
           </Link>
           {actor ? (
-            <ButtonLink href="/today" kind="quiet" size="compact">
+            <ButtonLink href={landingPathOf(actor)} kind="quiet" size="compact">
               Go to {actor.organisationName}
             </ButtonLink>
           ) : (

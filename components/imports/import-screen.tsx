@@ -1,4 +1,5 @@
 import { Breadcrumb } from '@/components/ui/breadcrumb'
+import { buttonClass } from '@/components/ui/button-class'
 import { ButtonLink } from '@/components/ui/button-link'
 import { Form } from '@/components/ui/form'
 import { Notice } from '@/components/ui/notice'
@@ -166,12 +167,12 @@ export function ImportScreen({ shown, mayRun, isFirstPage, actions }: Props) {
 function RejectedFiles({ id }: { id: string }) {
   return (
     <>
-      <ButtonLink href={`/api/v1/imports/${id}/rejected?format=xlsx`} kind="secondary" prefetch={false}>
+      <a href={`/api/v1/imports/${id}/rejected?format=xlsx`} download className={buttonClass('secondary')}>
         Rejected rows, Excel
-      </ButtonLink>
-      <ButtonLink href={`/api/v1/imports/${id}/rejected?format=csv`} kind="secondary" prefetch={false}>
+      </a>
+      <a href={`/api/v1/imports/${id}/rejected?format=csv`} download className={buttonClass('secondary')}>
         Rejected rows, CSV
-      </ButtonLink>
+      </a>
     </>
   )
 }

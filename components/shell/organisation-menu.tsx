@@ -70,6 +70,9 @@ export function OrganisationMenu({
         </>
       )}
       <MenuDivider />
+      <MenuLink href="/settings/password" current={isAt(path, '/settings/password')}>
+        Change your password
+      </MenuLink>
       <MenuAction onSelect={() => start(() => onSignOut())}>Sign out</MenuAction>
     </Menu>
   )

@@ -92,7 +92,7 @@ export async function makeFolder(dataDir) {
 }
 
 /** Starts a server on a folder, on the first free port from a number on. */
-export async function launch(dataDir, { database: from, flush }) {
+export async function launch(dataDir, { database: from, flush, memory }) {
   const account = serverAccount(dataDir)
   const name = `fuseward-${markOf(dataDir)}.sock`
   const temporary = temporaryFolder(account, name)
@@ -122,6 +122,8 @@ export async function launch(dataDir, { database: from, flush }) {
         '--max-allowed-packet=64M',
         '--innodb-snapshot-isolation=ON',
         `--innodb-flush-log-at-trx-commit=${flush}`,
+        `--innodb-buffer-pool-size=${memory}`,
+        '--innodb-log-file-size=256M',
       ],
       { cwd: '/', stdio: ['ignore', out, out], detached: true }, // its own session, so that Ctrl-C reaches only who stops it in order
     )

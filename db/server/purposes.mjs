@@ -11,12 +11,31 @@ export const LOGS = join(KEPT, 'logs')
 
 /**
  * `database`: the first port to try, then every second one; `web`, `mail`, `inbox` and `files` likewise, one by one.
- * `flush` 1 survives a power cut, 2 a killed process.
+ * `flush` 1 survives a power cut, 2 a killed process. `memory` is what the server may keep of its pages: 1 GiB holds
+ * 100,000 homes.
  */
 export const PURPOSES = {
-  demo: { folder: 'db', database: 13307, web: 3000, mail: 14307, inbox: 15307, files: 16307, flush: 1 },
-  test: { folder: 'test-db', database: 13337, flush: 2 },
-  e2e: { folder: 'e2e-db', database: 13367, web: 3300, mail: 14367, inbox: 15367, files: 16367, flush: 2 },
+  demo: {
+    folder: 'db',
+    database: 13307,
+    web: 3000,
+    mail: 14307,
+    inbox: 15307,
+    files: 16307,
+    flush: 1,
+    memory: '512M',
+  },
+  test: { folder: 'test-db', database: 13337, flush: 2, memory: '256M' },
+  e2e: {
+    folder: 'e2e-db',
+    database: 13367,
+    web: 3300,
+    mail: 14367,
+    inbox: 15367,
+    files: 16367,
+    flush: 2,
+    memory: '256M',
+  },
   shots: {
     folder: 'shots-db',
     database: 13397,
@@ -25,6 +44,7 @@ export const PURPOSES = {
     inbox: 15397,
     files: 16397,
     flush: 2,
+    memory: '256M',
   },
   bench: {
     folder: 'bench-db',
@@ -34,6 +54,7 @@ export const PURPOSES = {
     inbox: 15427,
     files: 16427,
     flush: 1,
+    memory: '1G',
   },
 }
 

@@ -32,7 +32,7 @@ export async function writeStockFile(path: string, n: number): Promise<void> {
     const inspected = pick.fraction() < 0.85
     const row = [
       `B-${at + 1}`,
-      String(880_000_000_000 + at * 3),
+      String(880_000_123_457 + at * 3),
       (at % 120) + 1,
       `Marram ${street} Road`,
       'Marram Bay',

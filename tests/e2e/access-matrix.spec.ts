@@ -49,15 +49,12 @@ function pathOf(file: string, row: Row): string {
   return `${path || '/'}${row.query ?? ''}`
 }
 
-/** Where a page that is still loading turns out not to be there, the status is sent already; the page says so itself. */
-const STREAMED_404 = 'NEXT_HTTP_ERROR_FALLBACK;404'
-
 /** A page sends to the sign-in page, or to where a role begins; "not found" is both its refusal and its silence. */
 async function pageOutcome(response: APIResponse): Promise<Outcome | string> {
   const status = response.status()
   const to = response.headers().location ?? ''
   if (status === 307 && /\/sign-in(\?|$)/.test(to)) return 'asked to sign in'
-  if (status === 404 || (status === 200 && (await response.text()).includes(STREAMED_404))) return 'not found'
+  if (status === 404) return 'not found'
   return status === 200 || status === 307 ? 'let in' : `answered ${status}`
 }
 
