@@ -24,7 +24,7 @@ async function surroundings() {
 
 /** Runs it where it can be talked to, and in the folder that it was called from, so that its paths mean what they say. */
 function run(words, settings) {
-  const child = spawn(process.execPath, ['--max-semi-space-size=32', '--import', 'tsx', ...words], {
+  const child = spawn(process.execPath, ['--max-semi-space-size=16', '--import', 'tsx', ...words], {
     env: settings,
     stdio: 'inherit',
   })

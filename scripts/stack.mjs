@@ -16,7 +16,7 @@ import { quietly } from './steps.mjs'
 import { SIGN_INS } from './welcome.mjs'
 
 // a larger young generation: reading thousands of rows makes much that dies at once
-const TYPESCRIPT = [process.execPath, '--max-semi-space-size=32', '--import', 'tsx']
+const TYPESCRIPT = [process.execPath, '--max-semi-space-size=16', '--import', 'tsx']
 const PATIENCE = 90_000
 const ON_THIS_MACHINE = ['127.0.0.1', '::1', '0.0.0.0', '::']
 

@@ -2,6 +2,7 @@
 import { now } from '@/lib/platform/clock'
 import { newId } from '@/lib/platform/new-id'
 import { type DeploymentScope, type Scope, type WritingScope } from '@/db/connection'
+import { claimNext, held, type Leased, lengthened, putBack, type Queue } from './lease'
 
 export type NewJob = {
   kind: string
@@ -27,14 +28,7 @@ export type JobProgress = {
   error: string | null
 }
 
-type Row = {
-  organisation_id: string
-  id: string
-  kind: string
-  payload: string
-  fence: number
-  attempts: number
-}
+type Row = Leased & { kind: string; payload: string }
 
 /** Queues a job, in the transaction of the change that caused it. */
 export async function enqueue(scope: WritingScope, job: NewJob): Promise<void> {
@@ -52,47 +46,26 @@ export async function enqueue(scope: WritingScope, job: NewJob): Promise<void> {
     .ignore()
 }
 
+const QUEUE: Queue = { table: 'jobs', working: 'running' }
+
 /** Claims the next job that is due, or one whose worker died; null where there is none. */
 export async function claim(
   scope: DeploymentScope,
   owner: string,
   leaseSeconds: number,
 ): Promise<ClaimedJob | null> {
-  const at = now()
-  const candidates = (await scope
-    .db('jobs')
-    .whereIn('state', ['waiting', 'running'])
-    .andWhere('due_at', '<=', at)
-    .andWhere((either) => either.where('state', 'waiting').orWhere('lease_until', '<', at))
-    .orderBy(['due_at', 'id'])
-    .limit(10)) as Row[]
-  for (const row of candidates) {
-    const claimed = await scope
-      .db('jobs')
-      .where({ organisation_id: row.organisation_id, id: row.id, fence: row.fence })
-      .whereIn('state', ['waiting', 'running'])
-      .update({
-        state: 'running',
-        lease_owner: owner,
-        lease_until: new Date(at.getTime() + leaseSeconds * 1000),
-        fence: Number(row.fence) + 1,
-        attempts: row.attempts + 1,
-      })
-    if (claimed === 1)
-      return {
-        organisationId: row.organisation_id,
-        id: row.id,
-        kind: row.kind,
-        payload: JSON.parse(row.payload) as Record<string, unknown>,
-        fence: Number(row.fence) + 1,
-        attempts: row.attempts + 1,
-      }
-  }
-  return null
+  const row = await claimNext<Row>(scope, QUEUE, owner, leaseSeconds)
+  return (
+    row && {
+      organisationId: row.organisation_id,
+      id: row.id,
+      kind: row.kind,
+      payload: JSON.parse(row.payload) as Record<string, unknown>,
+      fence: row.fence,
+      attempts: row.attempts,
+    }
+  )
 }
-
-const held = (scope: DeploymentScope, job: ClaimedJob) =>
-  scope.db('jobs').where({ organisation_id: job.organisationId, id: job.id, fence: job.fence })
 
 /** Lengthens the lease and notes progress; false where the lease was lost, and the work must stop. */
 export async function keep(
@@ -101,23 +74,14 @@ export async function keep(
   leaseSeconds: number,
   progress?: { done: number; total: number | null },
 ): Promise<boolean> {
-  const changed = await held(scope, job).update({
-    lease_until: new Date(now().getTime() + leaseSeconds * 1000),
-    ...(progress && { progress_done: progress.done, progress_total: progress.total }),
-  })
-  return changed === 1
+  const noted = progress && { progress_done: progress.done, progress_total: progress.total }
+  return (await held(scope, QUEUE, job).update({ ...lengthened(leaseSeconds), ...noted })) === 1
 }
 
 /** Marks a claimed job as done; false where the lease was lost. */
 export async function markDone(scope: DeploymentScope, job: ClaimedJob): Promise<boolean> {
-  return (
-    (await held(scope, job).update({
-      state: 'done',
-      finished_at: now(),
-      lease_until: null,
-      last_error: null,
-    })) === 1
-  )
+  const done = { state: 'done', finished_at: now(), lease_until: null, last_error: null }
+  return (await held(scope, QUEUE, job).update(done)) === 1
 }
 
 /** Puts a claimed job back for another try, or gives it up where `retryAt` is null. */
@@ -127,13 +91,7 @@ export async function markFailed(
   why: string,
   retryAt: Date | null,
 ): Promise<void> {
-  await held(scope, job).update({
-    state: retryAt ? 'waiting' : 'dead',
-    due_at: retryAt ?? now(),
-    lease_until: null,
-    last_error: why.slice(0, 500),
-    finished_at: retryAt ? null : now(),
-  })
+  await held(scope, QUEUE, job).update({ ...putBack(why, retryAt), finished_at: retryAt ? null : now() })
 }
 
 /** How a job is getting on, by its kind and key. */

@@ -52,6 +52,23 @@ export const FIXED_CHOICES: Record<Exclude<ListFilter, 'patch' | 'block'>, reado
   })),
 }
 
+type Place = { readonly id: string; readonly name: string; readonly homes: number }
+
+/** The choices of the filters that are an organisation's own: its patches, "in no patch", and its blocks. */
+export function placeChoices(found: {
+  readonly patches: readonly Place[]
+  readonly inNoPatch: number
+  readonly blocks: readonly Place[]
+}): { patches: FilterChoice[]; blocks: FilterChoice[] } {
+  const asChoice = ({ id, name, homes }: Place): FilterChoice => ({ value: id, label: name, homes })
+  const noPatch = { value: 'none', label: 'In no patch', homes: found.inNoPatch }
+  const patches = found.patches.map(asChoice)
+  return {
+    patches: found.inNoPatch > 0 ? [...patches, noPatch] : patches,
+    blocks: found.blocks.map(asChoice),
+  }
+}
+
 /**
  * The address of the list for a query; a changed query starts at its first page.
  * @example listAddress({ ...homeQueryOf({}), search: 'quay' }) // '/homes?search=quay'

@@ -14,7 +14,7 @@ export async function benchImport(folder: string, rows: number, run: Run): Promi
   await writeStockFile(path, rows)
   const { manager } = await anOrganisation({ name: 'Bench Import' })
   const { slug } = await organisations.get(reading(manager))
-  const words = ['--max-semi-space-size=32', '--import', 'tsx', 'tests/bench/import-once.ts', path, slug]
+  const words = ['--max-semi-space-size=16', '--import', 'tsx', 'tests/bench/import-once.ts', path, slug]
   const { stdout } = await run(process.execPath, words, { maxBuffer: 1_000_000 })
   const taken = JSON.parse(stdout) as { milliseconds: number; peakMiB: number; added: number }
   if (taken.added !== rows) throw new Error(`the import added ${taken.added} homes of ${rows}`)

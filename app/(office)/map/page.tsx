@@ -3,6 +3,7 @@ import { requireActor } from '@/app/session'
 import { show } from '@/app/show'
 import { MapScreen } from '@/components/map/map-screen'
 import { can } from '@/lib/access/can'
+import { placeChoices } from '@/lib/homes/filter-names'
 import { homeQueryOf } from '@/lib/homes/home-query'
 import { today } from '@/lib/platform/clock'
 import { env } from '@/lib/platform/env'
@@ -19,19 +20,11 @@ export default async function MapPage({ searchParams }: Props) {
   const query = homeQueryOf(await searchParams)
   const [list, choices] = await show(Promise.all([listHomes(actor, query, day), filterChoices(actor, day)]))
   const { TILE_URL, TILE_ATTRIBUTION } = env()
-  const asChoice = ({ id, name, homes }: { id: string; name: string; homes: number }) => ({
-    value: id,
-    label: name,
-    homes,
-  })
-  const noPatch =
-    choices.inNoPatch > 0 ? [{ value: 'none', label: 'In no patch', homes: choices.inNoPatch }] : []
   return (
     <MapScreen
       query={query}
       list={list}
-      patches={[...choices.patches.map(asChoice), ...noPatch]}
-      blocks={choices.blocks.map(asChoice)}
+      {...placeChoices(choices)}
       tiles={TILE_URL ? { url: TILE_URL, attribution: TILE_ATTRIBUTION ?? '' } : null}
       today={day}
       mayImport={can(actor, 'imports.run')}

@@ -6,6 +6,8 @@ import { reachOf } from '@/lib/access/reach'
 import { type CalendarDay } from '@/lib/calendar/calendar-day'
 
 export type FilterChoices = {
+  /** the same patches with how many of their homes have rewireable ways, and how many may */
+  readonly byPatch: readonly counts.PatchCount[]
   readonly patches: readonly { readonly id: string; readonly name: string; readonly homes: number }[]
   /** homes in no patch; 0 for somebody who sees only some patches */
   readonly inNoPatch: number
@@ -25,6 +27,7 @@ export async function filterChoices(actor: Actor, _today: CalendarDay): Promise<
     counts.countByBlock(scope, reachOf(actor), MOST_BLOCKS + 1),
   ])
   return {
+    byPatch: patches,
     patches: patches.flatMap(({ patch, homes }) => (patch ? [{ ...patch, homes }] : [])),
     inNoPatch: patches.find(({ patch }) => patch === null)?.homes ?? 0,
     blocks: blocks.slice(0, MOST_BLOCKS),

@@ -25,7 +25,7 @@ export type ApplyContext = {
 }
 
 /** How many drafts go into the register at once. */
-const CHUNK = 1_000
+const CHUNK = 500
 
 /**
  * Takes drafts into the register within one transaction: matches, merges, writes, refreshes the derived rows

@@ -28,7 +28,7 @@ export type FileToTakeIn = {
 }
 
 /** How many homes are handed on at once. */
-const CHUNK = 1_000
+const CHUNK = 500
 
 /**
  * Takes a whole file into the register in one transaction: all of it, or nothing where the process dies.
