@@ -31,7 +31,8 @@ export function ScrollRegion({
     <div
       ref={region}
       {...(fits ? {} : { role: 'region', 'aria-label': label, tabIndex: 0 })}
-      className={classNames('min-w-0', fits ? 'overflow-visible' : 'overflow-x-auto', className)}
+      // relative: words for readers alone are placed absolutely, and would else stretch the page from inside the table
+      className={classNames('relative min-w-0', fits ? 'overflow-visible' : 'overflow-x-auto', className)}
     >
       {children}
     </div>

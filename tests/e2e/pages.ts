@@ -36,11 +36,15 @@ export const PAGES: readonly PictureOf[] = [
   { name: 'not-found', path: '/nowhere', as: ['visitor', 'manager'] },
   { name: 'today', path: '/today', as: [...OFFICE, 'landlord'] },
   { name: 'homes', path: '/homes', as: [...OFFICE, 'landlord'] },
-  { name: 'homes-rewireable', path: '/homes?board=rewireable-ways', as: ['manager', 'officer'] },
+  {
+    name: 'homes-rewireable',
+    path: '/homes?board=rewireable-ways&standing=lapsed',
+    as: ['manager', 'officer'],
+  },
   { name: 'homes-none', path: '/homes?search=no+such+home', as: ['manager'] },
   {
     name: 'homes-columns',
-    path: '/homes?columns=board,cover,built,inspected,standing,defects,score,patch,block,tenure,type,wiring,rewired,bedrooms,reference,uprn,nation',
+    path: '/homes?search=tansy&columns=board,cover,built,inspected,standing,defects,score,patch,block,tenure,type,wiring,rewired,bedrooms,reference,uprn,nation',
     as: ['manager'],
   },
   {

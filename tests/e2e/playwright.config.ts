@@ -20,7 +20,6 @@ export default defineConfig({
     timezoneId: 'Europe/London',
     viewport: { width: 1440, height: 900 },
     launchOptions: CHROMIUM,
-    trace: 'retain-on-failure',
     screenshot: 'only-on-failure',
   },
 })
