@@ -55,7 +55,13 @@ for (const { name, path, as, click = [], until } of PAGES)
         for (const colorScheme of THEMES) {
           await page.emulateMedia({ colorScheme })
           await drawn(page)
-          expect(await violationsOn(page), `${name} at ${width} px, ${colorScheme}`).toEqual([])
+          // asked again where something is found: a page that is just changing has no title for a moment
+          await expect
+            .poll(() => violationsOn(page), {
+              message: `${name} at ${width} px, ${colorScheme}`,
+              timeout: 15_000,
+            })
+            .toEqual([])
         }
       }
       expect(blocked, 'blocked by the content policy').toEqual([])
