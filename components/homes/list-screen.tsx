@@ -54,7 +54,7 @@ function lineOf({ query, list }: Pick<Props, 'query' | 'list'>): string {
 /** The register: which homes, what is on their walls, where they stand, which first. */
 export function ListScreen({ query, list, patches, blocks, byPatch, today, may }: Props) {
   const choices = { ...FIXED_CHOICES, patch: patches, block: blocks }
-  const anyFilter = filtersOn(query, choices).length > 0
+  const on = filtersOn(query, choices).length
   const asksRewireable = query.board.length === 1 && query.board[0] === 'rewireable-ways'
   if (list.all === 0) {
     return (
@@ -120,7 +120,8 @@ export function ListScreen({ query, list, patches, blocks, byPatch, today, may }
         </div>
         <ListColumns key={query.columns.join()} query={query} />
       </div>
-      {byPatch && (
+      {/* the patches count every home, so they stand only where nothing else narrows the list */}
+      {byPatch && on === 1 && (
         <div className="mb-6">
           <Disclosure summary="By patch, with unknowns counted apart" open>
             <RewireableByPatch patches={byPatch} />
@@ -130,7 +131,7 @@ export function ListScreen({ query, list, patches, blocks, byPatch, today, may }
       {list.rows.length === 0 ? (
         <EmptyState
           title="No home matches"
-          actions={anyFilter && <ButtonLink href="/homes">Show every home</ButtonLink>}
+          actions={on > 0 && <ButtonLink href="/homes">Show every home</ButtonLink>}
         >
           Take off a filter above, or look for fewer words. Unknown facts are a choice of their own in each
           filter.
