@@ -12,13 +12,22 @@ function demandOwnOrigin(request: Request): void {
     throw new NotAllowed('This upload came from another site.')
 }
 
+/** The name that the header holds, percent-encoded; one that is not is taken as it stands. */
+function nameOf(header: string): string {
+  try {
+    return decodeURIComponent(header)
+  } catch {
+    return header
+  }
+}
+
 /** The upload itself: as the whole body with its name beside it, or as an ordinary form where there is no script. */
 async function uploadOf(request: Request) {
   const isForm = request.headers.get('content-type')?.startsWith('multipart/form-data') ?? false
   if (!isForm)
     return {
       isForm,
-      name: decodeURIComponent(request.headers.get('x-file-name') ?? ''),
+      name: nameOf(request.headers.get('x-file-name') ?? ''),
       content: request.body,
     }
   if (Number(request.headers.get('content-length') ?? Infinity) > MOST_BYTES)
